@@ -31,6 +31,12 @@ export const photoStateSchema = z.object({
 export const announceResponseSchema = z.object({ photos: z.array(photoStateSchema) });
 export type AnnounceResponse = z.infer<typeof announceResponseSchema>;
 
+/**
+ * With the device credential, each repeatable at will, multipart/form-data with one file field, answered with `PhotoState`:
+ * POST /api/photos/:sha256/parts/:n (field `part`, part n from 0) and POST /api/photos/:sha256/preview (field `preview`, JPEG).
+ */
+export const photoFields = { part: 'part', preview: 'preview' } as const;
+
 /** POST /api/photos/:sha256/complete: the parts are joined, hashed, synced to disk and renamed; then it counts as proof. */
 export const completeResponseSchema = photoStateSchema;
 export type PhotoState = z.infer<typeof photoStateSchema>;
