@@ -14,8 +14,11 @@ export async function pullAll(ports: DeliveryPorts): Promise<StepResult> {
   const { store, transport, clock } = ports;
   let progressed = false;
   let renewed = false;
+  let refusedAt: FeedPlace | null = null;
   for (;;) {
     const place = await store.feedPlace();
+    // The store takes no page although nobody has moved the cursor: this reader has been replaced.
+    if (refusedAt !== null && samePlace(refusedAt, place)) return stepDone(progressed);
     const sentMs = clock.nowMs();
     const sent = await withinLimit(clock, requestLimitsMs.pull, (limitMs) =>
       transport.pull(place, feedPageItems, limitMs),
@@ -35,22 +38,30 @@ export async function pullAll(ports: DeliveryPorts): Promise<StepResult> {
     const step = await takePage(ports, place, answer);
     progressed ||= step.progressed;
     if (step.reason !== null || !step.more) return { ...step, progressed };
+    refusedAt = step.refused ? place : null;
   }
 }
 
-async function takePage(
-  { store }: DeliveryPorts,
-  place: FeedPlace,
-  answer: FeedAnswer,
-): Promise<StepResult & { more: boolean }> {
+interface PageResult extends StepResult {
+  more: boolean;
+  /** The store did not take the page: somebody else has moved the cursor meanwhile. */
+  refused: boolean;
+}
+
+async function takePage({ store }: DeliveryPorts, place: FeedPlace, answer: FeedAnswer): Promise<PageResult> {
   if (place.epoch !== null && place.epoch !== answer.epoch) {
     const dropped = await store.restartFeed(place, answer.epoch);
-    return { ...stepDone(dropped), more: true };
+    return { ...stepDone(dropped), more: true, refused: !dropped };
   }
-  if (answer.cursor < place.cursor) return { ...stepFailed('unreadable-answer', false), more: false };
+  if (answer.cursor < place.cursor)
+    return { ...stepFailed('unreadable-answer', false), more: false, refused: false };
   if (answer.cursor === place.cursor && answer.more)
-    return { ...stepFailed('no-progress', false), more: false };
+    return { ...stepFailed('no-progress', false), more: false, refused: false };
   const news = answer.cursor > place.cursor || place.epoch === null;
   const applied = news ? await store.applyFeed(place, answer) : true;
-  return { ...stepDone(news && applied), more: answer.more || !applied };
+  return { ...stepDone(news && applied), more: answer.more || !applied, refused: !applied };
+}
+
+function samePlace(a: FeedPlace, b: FeedPlace): boolean {
+  return a.epoch === b.epoch && a.cursor === b.cursor;
 }

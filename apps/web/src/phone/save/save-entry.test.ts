@@ -1,20 +1,15 @@
 import { emptyChain, verifyChain } from '@rimeward/delivery';
 import { entryTypes, envelopeSchema } from '@rimeward/field-log';
-import { Dexie } from 'dexie';
-import { IDBDatabase, IDBFactory, IDBObjectStore } from 'fake-indexeddb';
+import { IDBDatabase, IDBObjectStore } from 'fake-indexeddb';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { codec } from '../codec';
-import { closeDatabase, database } from '../database/database';
+import { database } from '../database/database';
+import { freshDatabase } from '../testing/fresh-database';
 import { enrolTechnician, noteOf, visitId } from '../testing/people';
 import { saveEntry } from './save-entry';
 import { typeVersions } from './type-versions';
 
-beforeEach(() => {
-  closeDatabase();
-  const factory = new IDBFactory();
-  vi.stubGlobal('indexedDB', factory);
-  Dexie.dependencies.indexedDB = factory;
-});
+beforeEach(freshDatabase);
 afterEach(() => vi.restoreAllMocks());
 
 describe('saveEntry', () => {
@@ -45,8 +40,8 @@ describe('saveEntry', () => {
     const transaction = vi.spyOn(IDBDatabase.prototype, 'transaction');
     await enrolTechnician(1);
     await saveEntry(noteOf(1, 'one'));
-    const writing = transaction.mock.calls.filter(([stores]) =>
-      [...(stores as string[])].includes('entries'),
+    const writing = transaction.mock.calls.filter(
+      ([tables, mode]) => mode === 'readwrite' && [...(tables as string[])].includes('entries'),
     );
     expect(writing.length).toBe(1);
     expect(writing[0]?.[2]).toEqual({ durability: 'strict' });
