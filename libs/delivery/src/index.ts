@@ -30,3 +30,12 @@ export type {
 } from './ports/transport';
 export { runRound, type RoundReport } from './round/round';
 export { freshMemory, type DeliveryMemory } from './round/step';
+export {
+  bundleFirstLine,
+  readBundle,
+  sectionEnd,
+  sectionLine,
+  type BundleReading,
+  type BundleSection,
+  type SectionHeader,
+} from './bundle/bundle-format';

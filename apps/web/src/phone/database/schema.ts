@@ -166,7 +166,7 @@ export const stores = {
   chains: 'device',
   entries: '[device+seq], id, [owner+visit], [device+heldReason]',
   outbox: '[device+seq]',
-  photos: '[device+sha256], sha256, [device+state]',
+  photos: '[device+sha256], device, sha256, [device+state]',
   chunks: '[sha256+n]',
   previews: 'sha256',
   drafts: '[owner+key]',

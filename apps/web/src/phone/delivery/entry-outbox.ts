@@ -86,12 +86,13 @@ export function entryOutbox(db: PhoneDatabase, device: string): EntryCalls {
       db.transaction('rw', db.chains, db.entries, db.outbox, db.receipts, async () => {
         const row = await chain();
         if (row.acknowledged.seq !== from.seq) return true;
-        const acknowledged = await markAt(to);
+        const next = await db.entries.get([device, to.seq + 1]);
         const kept = await db.entries
           .where('[device+seq]')
           .between([device, to.seq + 1], [device, from.seq], true, true)
           .primaryKeys();
-        if (acknowledged === null || kept.length !== from.seq - to.seq) return false;
+        if (next === undefined || kept.length !== from.seq - to.seq) return false;
+        const acknowledged = { ...to, bytesThrough: next.bytesThrough - next.byteLength };
         await db.outbox.bulkPut(kept.map(([, seq]) => ({ device, seq })));
         await db.receipts
           .where('[device+through]')
