@@ -1,0 +1,3 @@
+const en = { title: 'Morning review' };
+export type ReviewTexts = typeof en;
+export default en;

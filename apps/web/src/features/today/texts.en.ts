@@ -1,0 +1,33 @@
+const en = {
+  title: 'Today',
+  noStops: 'No stop is planned for this day on this phone.',
+  ready: 'Ready for the day: every stop is on this phone',
+  notReady: 'Not everything is on this phone yet. Keep the app open with a signal.',
+  neverPulled: 'This phone has not reached the office yet. Connect once to bring the day here.',
+  stop: 'Stop {{sequence}}',
+  sentBack: 'Sent back: {{count}} questions',
+  sentBack_one: 'Sent back: {{count}} question',
+  standing: {
+    untouched: 'to do',
+    started: 'started',
+    left: 'done',
+    answered: 'answered',
+    accepted: 'accepted',
+    'sent-back': 'sent back',
+    'return-visit': 'return visit',
+  },
+  purpose: { winterize: '', 'return-visit': 'Return visit', spring: 'Spring visit' },
+  zones: '{{count}} zones',
+  zones_one: '{{count}} zone',
+  earlier: 'The day before',
+  later: 'The day after',
+  today: 'Today',
+  onThisPhone: 'On this phone',
+  next: 'Next stop: {{site}}',
+  dayDone: 'The day is done',
+  waiting: '{{count}} entries wait on this phone',
+  waiting_one: '{{count}} entry waits on this phone',
+  allDelivered: 'Everything is with the office',
+};
+export type TodayTexts = typeof en;
+export default en;
