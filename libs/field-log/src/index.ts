@@ -1,11 +1,12 @@
+export * from './words/words';
 export * from './system/backflow';
+export * from './system/hand-valves';
 export * from './system/pipe-run';
 export * from './system/system';
 export * from './system/zone';
 export * from './entry/envelope';
 export * from './entry/log-entry';
 export * from './entry-types/registry';
-export { endSigns } from './entry-types/air';
 export * from './visit/visit-state';
 export { foldVisit } from './fold/fold-visit';
 export { inLogOrder, estimatedMs, type TimedEntry } from './fold/order';

@@ -1,9 +1,10 @@
 import { z } from 'zod';
+import { closeDownSteps, connectionPlaces, endSigns } from '../words/words';
 
 const gaugePsi = z.number().min(0).max(500);
 
 export const airConnectedBody = z.strictObject({
-  place: z.enum(['blow-out-fitting', 'quick-coupler', 'hose-bib', 'test-cock', 'other']),
+  place: z.enum(connectionPlaces),
   downstreamOfBackflow: z.boolean(),
   couplingsPinned: z.boolean(),
 });
@@ -35,7 +36,6 @@ export const airStoppedBody = z.strictObject({
   elapsedMs: z.number().int().min(0).nullable(),
 });
 
-export const endSigns = ['water', 'spitting', 'mist', 'dry'] as const;
 export const endSignSeenBody = z.strictObject({ cycleId: z.uuid(), sign: z.enum(endSigns) });
 
 export const gaugeReadBody = z.strictObject({ cycleId: z.uuid().nullable(), pressurePsi: gaugePsi });
@@ -46,5 +46,5 @@ export const zoneSkippedBody = z.strictObject({ zoneId: z.uuid(), reason: z.stri
 
 /** Compressor off, then hose pressure bled, then hose off: one entry each, in any order that happened. */
 export const airClosedDownBody = z.strictObject({
-  step: z.enum(['compressor-off', 'hose-bled', 'hose-off']),
+  step: z.enum(closeDownSteps),
 });

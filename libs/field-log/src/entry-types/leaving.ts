@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { cutShortReasons, presences, visitOutcomes } from '../words/words';
 
 export const defectFoundBody = z.strictObject({
   zoneId: z.uuid().nullable(),
@@ -10,10 +11,10 @@ export const defectFoundBody = z.strictObject({
 export const noteWrittenBody = z.strictObject({ text: z.string().min(1).max(4_000) });
 
 export const leftBody = z.strictObject({
-  outcome: z.enum(['done', 'cut-short']),
+  outcome: z.enum(visitOutcomes),
   /** Asked for when the visit was cut short. */
-  why: z.enum(['no-access', 'no-shutoff', 'broken-pipe', 'weather', 'other']).nullable(),
-  present: z.enum(['signed', 'nobody-present']),
+  why: z.enum(cutShortReasons).nullable(),
+  present: z.enum(presences),
   signerName: z.string().max(120).optional(),
   /** Strokes of the signature as an SVG path in a 300 x 100 box. */
   signaturePath: z.string().max(20_000).optional(),

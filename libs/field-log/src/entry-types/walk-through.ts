@@ -1,11 +1,11 @@
 import { z } from 'zod';
-import { sensitivePartKinds } from '../system/system';
+import { keepingPlaces, partOutcomes, partProtections, sensitivePartKinds } from '../words/words';
 
 /** A sensitive part was looked for. `partId` is one of the system's parts or a new id for a part found on site. */
 export const partLookedForBody = z.strictObject({
   partId: z.uuid(),
   kind: z.enum(sensitivePartKinds),
-  outcome: z.enum(['found', 'none', 'not-found']),
+  outcome: z.enum(partOutcomes),
   note: z.string().max(1_000).optional(),
 });
 
@@ -13,13 +13,16 @@ export const partLookedForBody = z.strictObject({
 export const partProtectedBody = z.strictObject({
   partId: z.uuid(),
   kind: z.enum(sensitivePartKinds),
-  how: z.enum(['removed-blank', 'removed-spool', 'bypassed', 'left']),
-  keptWhere: z.enum(['truck', 'controller', 'customer', 'on-site', 'nowhere']).nullable(),
+  how: z.enum(partProtections),
+  keptWhere: z.enum(keepingPlaces).nullable(),
   keptNote: z.string().max(200).optional(),
   reason: z.string().max(1_000).optional(),
 });
 
-/** Further photographs for something that has been recorded. `subject` is a part, valve, drain or zone id. */
+/**
+ * Further photographs for something that has been recorded. `subject` is the id of a part, valve, drain, pump or zone,
+ * or of the entry that told of damage or a defect.
+ */
 export const photographsAddedBody = z.strictObject({
   subject: z.string().max(80).nullable(),
   caption: z.string().max(300).optional(),

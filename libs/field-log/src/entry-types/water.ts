@@ -1,7 +1,8 @@
 import { z } from 'zod';
+import { valvePositions, valveStages, waterOffKinds } from '../words/words';
 
 export const waterOffBody = z.strictObject({
-  kind: z.enum(['shutoff-closed', 'was-closed', 'street-closed']),
+  kind: z.enum(waterOffKinds),
   note: z.string().max(1_000).optional(),
 });
 
@@ -14,8 +15,8 @@ export const pressureRelievedBody = z.strictObject({ zoneId: z.uuid().nullable()
  */
 export const valveSetBody = z.strictObject({
   valveId: z.string().min(1).max(40),
-  stage: z.enum(['before-air', 'winter']),
-  position: z.enum(['closed', 'half-open', 'open', 'other']),
+  stage: z.enum(valveStages),
+  position: z.enum(valvePositions),
   workedThrough: z.boolean(),
   note: z.string().max(500).optional(),
 });

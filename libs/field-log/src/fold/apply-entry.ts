@@ -1,5 +1,5 @@
 import type { FoldedEntry, VisitState } from '../visit/visit-state';
-import { closeZoneOf, startCycle, zoneState, type CycleFacts } from './fold-air';
+import { startCycle, stopCycle, zoneState, type CycleFacts } from './fold-air';
 import { protectPart, seePart } from './fold-parts';
 import { said } from './said';
 
@@ -97,7 +97,7 @@ export function applyEntry(state: VisitState, folded: FoldedEntry, facts: CycleF
       state.answers.push({ ...entry.body, ...by });
       break;
     case 'air-stopped':
-      closeZoneOf(state, entry.body.cycleId);
+      stopCycle(state, entry.body.cycleId, facts);
       break;
     case 'end-sign-seen':
     case 'gauge-read':

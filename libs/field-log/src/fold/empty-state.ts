@@ -1,5 +1,11 @@
 import type { VisitState } from '../visit/visit-state';
 
+/** A table without inherited members: ids come from outside, and one of them may be called `constructor`. */
+function byId<T>(): Record<string, T> {
+  return Object.create(null) as Record<string, T>;
+}
+
+/** The state of a visit of which nothing has been written down. */
 export function emptyState(): VisitState {
   return {
     entries: [],
@@ -7,19 +13,19 @@ export function emptyState(): VisitState {
     devices: [],
     arrived: null,
     cautionsRead: [],
-    parts: {},
+    parts: byId(),
     waterOff: null,
     pressureRelieved: null,
-    valves: {},
+    valves: byId(),
     connection: null,
     regulator: null,
     peopleClear: null,
     interlocksPassed: [],
-    zones: {},
+    zones: byId(),
     runningCycles: [],
     airOn: false,
     closeDown: {},
-    drains: {},
+    drains: byId(),
     pump: null,
     plug: null,
     controller: null,

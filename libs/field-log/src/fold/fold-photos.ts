@@ -1,3 +1,4 @@
+import type { PhotoReference } from '../entry/envelope';
 import type { LogEntry } from '../entry/log-entry';
 import type { VisitState } from '../visit/visit-state';
 
@@ -11,8 +12,15 @@ export function attachPhotos(state: VisitState): void {
       if (subject === null) continue;
       state.parts[subject]?.photos.push(photo);
       state.valves[subject]?.photos.push(photo);
+      if (entry.type === 'photographs-added') addToFault(state, subject, photo);
     }
   }
+}
+
+/** Photographs taken later of damage or of a defect name its entry. */
+function addToFault(state: VisitState, entryId: string, photo: PhotoReference): void {
+  const fault = [...state.damageSeen, ...state.defects].find((one) => one.entryId === entryId);
+  fault?.photos.push(photo);
 }
 
 function subjectOf(entry: LogEntry): string | null {

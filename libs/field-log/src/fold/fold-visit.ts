@@ -1,7 +1,6 @@
 import type { LogEntry } from '../entry/log-entry';
 import type { FoldedEntry, VisitState } from '../visit/visit-state';
 import { applyEntry } from './apply-entry';
-import { bodyFits } from './body-fits';
 import { withCorrections } from './corrections';
 import { emptyState } from './empty-state';
 import { collectCycleFacts, settleAir } from './fold-air';
@@ -13,7 +12,7 @@ import { inLogOrder } from './order';
  * changes nothing. Entries must belong to one visit. Never throws.
  */
 export function foldVisit(entries: readonly LogEntry[]): VisitState {
-  const folded: FoldedEntry[] = withCorrections(inLogOrder(entries), bodyFits);
+  const folded: FoldedEntry[] = withCorrections(inLogOrder(entries));
   const state = emptyState();
   const facts = collectCycleFacts(folded);
   state.entries = folded;

@@ -57,7 +57,7 @@ export function airInterlocks(state: VisitState, system: System, conditions: Air
       state.regulator.pressurePsi <= conditions.ceilingPsi,
     'zone-open': conditions.zoneId !== null || Object.values(state.zones).some((zone) => zone.open),
     'cautions-read': state.cautionsRead.length > 0,
-    'people-clear': state.peopleClear?.areaClear === true && state.peopleClear.eyesAndEars,
+    'people-clear': peopleAreClear(state),
   };
   return interlockIds.map((id) => {
     const protectsPeople = protecting.has(id);
@@ -69,6 +69,11 @@ export function airInterlocks(state: VisitState, system: System, conditions: Air
 /** True when every interlock holds, or was passed with a reason where no person is at risk. */
 export function mayStartAir(interlocks: readonly Interlock[]): boolean {
   return interlocks.every((lock) => lock.satisfied || (!lock.protectsPeople && lock.passedBy !== null));
+}
+
+/** The area is clear and eyes and ears are protected, as said last. */
+export function peopleAreClear(state: VisitState): boolean {
+  return state.peopleClear?.areaClear === true && state.peopleClear.eyesAndEars;
 }
 
 /** Every part is removed, bypassed or declared absent. `not-found` and `left` leave it at risk. */

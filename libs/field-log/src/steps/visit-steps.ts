@@ -1,4 +1,5 @@
 import type { System } from '../system/system';
+import { peopleAreClear } from '../interlocks/interlocks';
 import type { VisitState, ZoneState } from '../visit/visit-state';
 
 /** The work of a visit in its safe order. */
@@ -90,7 +91,7 @@ function counts(id: VisitStepId, state: VisitState, system: System): [done: numb
     case 'regulator':
       return one(state.regulator);
     case 'people-clear':
-      return one(state.peopleClear && state.cautionsRead.length > 0);
+      return one(peopleAreClear(state) && state.cautionsRead.length > 0);
     case 'air':
       return [system.zones.filter((zone) => zoneIsDone(state.zones[zone.id])).length, system.zones.length];
     case 'close-down':

@@ -1,21 +1,8 @@
 import { z } from 'zod';
+import { removalMethods, sensitivePartKinds } from '../words/words';
 import { backflowAssemblySchema } from './backflow';
 import { pipeRunSchema } from './pipe-run';
 import { zoneSchema } from './zone';
-
-export const removalMethods = ['blow-out', 'manual-drain', 'automatic-drain', 'unknown'] as const;
-export type RemovalMethod = (typeof removalMethods)[number];
-
-/** Parts that air must not reach. */
-export const sensitivePartKinds = [
-  'flow-sensor',
-  'flow-meter',
-  'submeter',
-  'pump',
-  'pressure-regulator',
-  'filter',
-] as const;
-export type SensitivePartKind = (typeof sensitivePartKinds)[number];
 
 export const sensitivePartSchema = z.strictObject({
   id: z.uuid(),

@@ -1,7 +1,7 @@
 import type { EntryBody } from '../entry-types/registry';
 import type { LogEntry, LogEntryOf } from '../entry/log-entry';
 import type { PhotoReference } from '../entry/envelope';
-import type { SensitivePartKind } from '../system/system';
+import type { SensitivePartKind } from '../words/words';
 
 /** Where a fact comes from: the entry that said it last, who said it and when by the doubtful clock of the phone. */
 export interface Said {
@@ -54,6 +54,8 @@ export interface FoldedEntry {
   /** Estimated true time, never decreasing along one device's sequence. */
   atMs: number;
   corrections: LogEntryOf<'corrected'>[];
+  /** Ids of corrections whose new body is not one of this entry's type; they change nothing and a person looks at them. */
+  ignoredCorrections: string[];
   /** `standing` as written, `corrected` with another body, `withdrawn` altogether. */
   standing: 'standing' | 'corrected' | 'withdrawn';
 }
