@@ -93,4 +93,33 @@ describe('fold of a visit', () => {
   it('ties photographs to the part they show', () => {
     expect(foldVisit(visit).parts[testId(31)]?.photos).toEqual([photo(1)]);
   });
+
+  it("does not leave a zone open when the helper's clock puts the stop before the start", () => {
+    const state = foldVisit([
+      entry('air-started', { cycleId: cycle, zoneId: zone, gaugePsi: null }, { seq: 1, minute: 10 }),
+      entry('air-stopped', { cycleId: cycle, elapsedMs: null }, { device: helper, seq: 1, minute: 8 }),
+    ]);
+    expect(state.zones[zone]).toMatchObject({ open: false, cycles: [{ durationMs: 0 }] });
+    expect(state.airOn).toBe(false);
+  });
+
+  it('ties later photographs to the damage and the defect that they show', () => {
+    const damage = entry('damage-seen', { where: 'gate', what: 'cracked' }, { seq: 1 });
+    const later = entry('photographs-added', { subject: damage.id }, { seq: 2, photos: [photo(7)] });
+    expect(foldVisit([damage, later]).damageSeen[0]?.photos).toEqual([photo(7)]);
+  });
+
+  it('keeps standing upright when ids are called like members that every object inherits', () => {
+    const odd = ['__proto__', 'constructor', 'toString'].map((valveId, index) =>
+      entry(
+        'valve-set',
+        { valveId, stage: 'winter', position: 'half-open', workedThrough: true },
+        { seq: index + 1 },
+      ),
+    );
+    const subject = entry('photographs-added', { subject: 'hasOwnProperty' }, { seq: 9, photos: [photo(1)] });
+    const state = foldVisit([...odd, subject]);
+    expect(Object.keys(state.valves)).toEqual(['__proto__', 'constructor', 'toString']);
+    expect('winter' in {}).toBe(false);
+  });
 });
