@@ -1,0 +1,19 @@
+import { Column, Entity, PrimaryColumn } from 'typeorm';
+
+@Entity('customers')
+export class Customer {
+  @PrimaryColumn('uuid', { name: 'company_id' })
+  companyId: string;
+
+  @PrimaryColumn('uuid')
+  id: string;
+
+  @Column('text')
+  name: string;
+
+  @Column('text', { nullable: true })
+  phone: string | null;
+
+  @Column('text', { nullable: true })
+  email: string | null;
+}

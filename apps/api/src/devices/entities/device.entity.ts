@@ -1,0 +1,29 @@
+import { Column, Entity, PrimaryColumn } from 'typeorm';
+
+@Entity('devices')
+export class Device {
+  @PrimaryColumn('uuid', { name: 'company_id' })
+  companyId: string;
+
+  @PrimaryColumn('uuid')
+  id: string;
+
+  @Column('uuid', { name: 'user_id' })
+  userId: string;
+
+  @Column('text')
+  name: string;
+
+  @Column('text')
+  platform: string;
+
+  /** SHA-256 of the ingest secret, which is 256 random bits. */
+  @Column('bytea', { name: 'secret_hash' })
+  secretHash: Buffer;
+
+  @Column('timestamptz', { name: 'enrolled_at' })
+  enrolledAt: Date;
+
+  @Column('timestamptz', { name: 'revoked_at', nullable: true })
+  revokedAt: Date | null;
+}

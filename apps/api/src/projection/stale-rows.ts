@@ -1,0 +1,52 @@
+import type { EntityManager } from 'typeorm';
+import { companySetting as company } from '../database/protect-table';
+
+/** After so many failures a visit waits for its next change, or for a rebuild. */
+const mostAttempts = 5;
+
+/** Visits whose at-a-glance copy is older than their log, and visits that never had one. */
+export async function staleVisits(manager: EntityManager, limit: number): Promise<string[]> {
+  const rows = await manager.query<{ visit_id: string }[]>(
+    `select visit_id from stale_projections where company_id = ${company} and attempts < $1
+     order by attempts, since, visit_id limit $2`,
+    [mostAttempts, limit],
+  );
+  return rows.map((row) => row.visit_id);
+}
+
+/** Marks every visit that has no copy yet, or, for a rebuild, every visit. */
+export async function markUnprojected(manager: EntityManager, all: boolean): Promise<void> {
+  await manager.query(
+    `insert into stale_projections (company_id, visit_id)
+     select v.company_id, v.id from visits v
+     where v.company_id = ${company}
+       and ($1 or not exists (select from visit_projections p where p.company_id = v.company_id and p.visit_id = v.id))
+     order by v.id
+     on conflict (company_id, visit_id) do update set attempts = 0, mark = gen_random_uuid() where $1`,
+    [all],
+  );
+}
+
+/** The mark as it is before the log is read; a later change puts another one. */
+export async function readMark(manager: EntityManager, visitId: string): Promise<string | null> {
+  const rows = await manager.query<{ mark: string }[]>(
+    `select mark from stale_projections where company_id = ${company} and visit_id = $1`,
+    [visitId],
+  );
+  return rows[0]?.mark ?? null;
+}
+
+export async function clearMark(manager: EntityManager, visitId: string, mark: string): Promise<void> {
+  await manager.query(
+    `delete from stale_projections where company_id = ${company} and visit_id = $1 and mark = $2`,
+    [visitId, mark],
+  );
+}
+
+export async function noteFailure(manager: EntityManager, visitId: string, fault: string): Promise<void> {
+  await manager.query(
+    `update stale_projections set attempts = attempts + 1, last_fault = left($2, 500)
+     where company_id = ${company} and visit_id = $1`,
+    [visitId, fault],
+  );
+}
