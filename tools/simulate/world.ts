@@ -35,12 +35,15 @@ export async function run(seed: number, flaws: OfficeFlaws = {}): Promise<RunRes
     network.faultChance = random.pick([0, 0.1, 0.3, 0.6]);
     phone.crashChance = random.pick([0, 0, 0.001, 0.005]);
     phone.storageFaultChance = random.pick([0, 0, 0.002]);
-    phone.onAcknowledge = (through) => {
-      if (!office.everCommitted.has(`${phone.disk.device}:${through.seq}:${through.hash}`)) {
-        found.push(
-          `I6 ${phone.disk.device} took an acknowledgement of ${through.seq} that was never committed`,
-        );
-      }
+    phone.watch = {
+      acknowledged: ({ seq, hash }) => {
+        if (office.everCommitted.has(`${phone.disk.device}:${seq}:${hash}`)) return;
+        found.push(`I6 ${phone.disk.device} took an acknowledgement of ${seq} that was never committed`);
+      },
+      photoComplete: (sha256) => {
+        if (!office.everComplete.has(sha256))
+          found.push(`I4 photograph ${sha256} counted before it was whole`);
+      },
     };
     phone.open();
     work(time, random, phone, network, () => (kills += 1));

@@ -41,6 +41,9 @@ export class Office {
   parts = new Map<string, Map<number, Uint8Array>>();
   /** Every (device, seq, hash) that was ever committed, restored or not. */
   readonly everCommitted = new Set<string>();
+  /** Every photograph that was ever whole here, restored or not. */
+  readonly everComplete = new Set<string>();
+  private readonly announced = new Map<string, number>();
   deathChance = 0;
   private backup: OfficeDisk | null = null;
   private generation = 0;
@@ -159,6 +162,8 @@ export class Office {
   /** Null: the parts make another hash, and have been thrown away. */
   async complete(sha256: string) {
     const parts = [...(this.parts.get(sha256) ?? new Map<number, Uint8Array>())].sort(([a], [b]) => a - b);
+    const count = this.announced.get(sha256) ?? 0;
+    if (parts.length < count) return this.photoState(sha256, count);
     const whole = Buffer.concat(parts.map(([, bytes]) => bytes));
     await this.time.sleep(this.random.between(1, 100));
     if (this.random.chance(this.deathChance)) throw new ServerDied();
@@ -167,6 +172,7 @@ export class Office {
       return this.disk.complete.has(sha256) ? this.photoState(sha256, 0) : null;
     }
     this.disk.complete.set(sha256, new Uint8Array(whole));
+    this.everComplete.add(sha256);
     this.parts.delete(sha256);
     if (this.random.chance(this.deathChance)) throw new ServerDied();
     return this.photoState(sha256, 0);

@@ -5,12 +5,14 @@ import type { PhoneDisk } from './phone-disk';
 /** Runs one transaction on the disk: with its delay, and with death before or after it. */
 export type Transact = <T>(change: () => T) => Promise<T>;
 
+/** Hears what the phone takes for delivered, at the moment when it does. */
+export interface Watch {
+  acknowledged: (through: ChainHead) => void;
+  photoComplete: (sha256: string) => void;
+}
+
 /** The delivery's store on a simulated disk. Each call is one transaction, as on the real phone. */
-export function phoneStore(
-  disk: PhoneDisk,
-  transact: Transact,
-  onAcknowledge: (through: ChainHead) => void,
-): DeliveryStore {
+export function phoneStore(disk: PhoneDisk, transact: Transact, watch: Watch): DeliveryStore {
   return {
     standing: () =>
       transact(() => ({ device: disk.device, head: disk.head, acknowledged: disk.acknowledged })),
@@ -37,7 +39,7 @@ export function phoneStore(
     acknowledge: ({ through, receipt }) =>
       transact(() => {
         if (through.seq < disk.acknowledged.seq) return;
-        onAcknowledge(through);
+        watch.acknowledged(through);
         disk.receipts.push(receipt);
         for (const seq of disk.outbox) if (seq <= through.seq) disk.outbox.delete(seq);
         disk.acknowledged = through;
@@ -71,6 +73,7 @@ export function phoneStore(
     settlePhoto: (sha256, as) =>
       transact(() => {
         const photo = disk.photos.get(sha256);
+        if (as === 'complete') watch.photoComplete(sha256);
         if (photo !== undefined) disk.photos.set(sha256, { ...photo, state: as });
       }),
     reopenPhotos: (sha256s) =>

@@ -1,11 +1,11 @@
-import { sealEntry, startLoop, type ChainHead, type DeliveryLoop, type LoopStatus } from '@rimeward/delivery';
+import { sealEntry, startLoop, type DeliveryLoop, type LoopStatus } from '@rimeward/delivery';
 import { codec, sha256Hex } from '../codec';
 import type { Network } from '../network';
 import type { Office } from '../office/office';
 import type { Seeded } from '../random';
 import type { VirtualTime } from '../virtual-time';
 import { emptyPhone, type PhoneDisk } from './phone-disk';
-import { phoneStore, type Transact } from './phone-store';
+import { phoneStore, type Transact, type Watch } from './phone-store';
 import { phoneTransport } from './phone-transport';
 
 /** An entry that the screen has called saved. */
@@ -30,7 +30,7 @@ export class Phone {
   storageFaultChance = 0;
   /** Added to the wall clock; a person may change it at any time. */
   clockErrorMs = 0;
-  onAcknowledge: (through: ChainHead) => void = () => undefined;
+  watch: Watch = { acknowledged: () => undefined, photoComplete: () => undefined };
   private pages: Page[] = [];
 
   constructor(
@@ -108,7 +108,7 @@ export class Phone {
         clock: { nowMs: () => serverNow() + this.clockErrorMs, timer: (ms) => page.timer(ms) },
         random: this.random.next,
         codec,
-        store: phoneStore(this.disk, this.transact(page), (through) => this.onAcknowledge(through)),
+        store: phoneStore(this.disk, this.transact(page), this.watch),
         transport: phoneTransport(this.office, this.network, this.random, serverNow, (sent) =>
           page.live(sent),
         ),
