@@ -3,7 +3,7 @@ import type { PushResponse } from '@rimeward/contracts';
 import { emptyChain, sealEntry, type ChainHead, type Codec, type SealedEntry } from '@rimeward/delivery';
 import type { EntryBody, EntryType, PhotoReference } from '@rimeward/field-log';
 
-const codec: Codec = {
+export const codec: Codec = {
   utf8: (text) => new TextEncoder().encode(text),
   sha256: (bytes) => new Uint8Array(createHash('sha256').update(bytes).digest()),
 };
