@@ -1,0 +1,2 @@
+process.argv.push('--fast');
+await import('./test.mjs');
