@@ -4,6 +4,10 @@ import { generateKeyPairSync } from 'node:crypto';
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { AppModule } from '../../src/app.module';
+import { ENVIRONMENT } from '../../src/config/config.module';
+import { readEnvironment } from '../../src/config/environment';
+import { configureApp } from '../../src/configure-app';
 import { createTestDatabase, type TestDatabase } from './database';
 
 export interface TestApp {
@@ -15,31 +19,20 @@ export interface TestApp {
   close: () => Promise<void>;
 }
 
-/** The real application on a free port, against a fresh copy of the migrated database. */
-export async function createTestApp(environment: Record<string, string> = {}): Promise<TestApp> {
-  const database = await createTestDatabase();
+export const publicOrigin = 'http://127.0.0.1:4180';
+
+/** The real application on a free port, against a fresh copy of the migrated database or against the one that is given. */
+export async function createTestApp(
+  environment: Record<string, string> = {},
+  given?: TestDatabase,
+): Promise<TestApp> {
+  const database = given ?? (await createTestDatabase());
   const folder = mkdtempSync(join(tmpdir(), 'rimeward-app-'));
-  const keyFile = join(folder, 'signing.pem');
-  const { privateKey } = generateKeyPairSync('ec', { namedCurve: 'P-256' });
-  writeFileSync(keyFile, privateKey.export({ type: 'pkcs8', format: 'pem' }));
-  const photoDir = join(folder, 'photos');
-  Object.assign(process.env, {
-    NODE_ENV: 'test',
-    PORT: '0',
-    HOST: '127.0.0.1',
-    PUBLIC_ORIGIN: 'http://127.0.0.1:4180',
-    DATABASE_URL: database.appUrl,
-    PHOTO_DIR: photoDir,
-    SESSION_JWT_SECRET: 'a secret for tests of at least 32 characters',
-    SIGNING_KEY_FILE: keyFile,
-    COOKIE_SECURE: 'true',
-    LOG_LEVEL: 'silent',
-    ...environment,
-  });
-  // Read only now: the modules look at the environment when they are built.
-  const { AppModule } = await import('../../src/app.module');
-  const { configureApp } = await import('../../src/configure-app');
-  const module = await Test.createTestingModule({ imports: [AppModule] }).compile();
+  const source = { ...environmentIn(folder, database), ...environment };
+  const module = await Test.createTestingModule({ imports: [AppModule] })
+    .overrideProvider(ENVIRONMENT)
+    .useValue(readEnvironment(source))
+    .compile();
   const app = module.createNestApplication<NestExpressApplication>({ logger: false, bodyParser: false });
   configureApp(app);
   await app.listen(0, '127.0.0.1');
@@ -47,11 +40,33 @@ export async function createTestApp(environment: Record<string, string> = {}): P
     app,
     database,
     url: await app.getUrl(),
-    photoDir,
+    photoDir: source.PHOTO_DIR,
     close: async () => {
       await app.close();
-      await database.drop();
+      if (!given) await database.drop();
       rmSync(folder, { recursive: true, force: true });
     },
+  };
+}
+
+/** Everything that the application asks of its environment, in a folder of its own. */
+export function environmentIn(
+  folder: string,
+  database: Pick<TestDatabase, 'appUrl'>,
+): Record<string, string> & { PHOTO_DIR: string } {
+  const keyFile = join(folder, 'signing.pem');
+  const { privateKey } = generateKeyPairSync('ec', { namedCurve: 'P-256' });
+  writeFileSync(keyFile, privateKey.export({ type: 'pkcs8', format: 'pem' }));
+  return {
+    NODE_ENV: 'test',
+    PORT: '0',
+    HOST: '127.0.0.1',
+    PUBLIC_ORIGIN: publicOrigin,
+    DATABASE_URL: database.appUrl,
+    PHOTO_DIR: join(folder, 'photos'),
+    SESSION_JWT_SECRET: 'a secret for tests of at least 32 characters',
+    SIGNING_KEY_FILE: keyFile,
+    COOKIE_SECURE: 'true',
+    LOG_LEVEL: 'silent',
   };
 }

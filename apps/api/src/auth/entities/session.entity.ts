@@ -1,6 +1,10 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('sessions')
+@Index('sessions_id', ['id'])
+@ForeignKey('User', ['companyId', 'userId'], ['companyId', 'id'], {
+  name: 'sessions_company_id_user_id_fkey',
+})
 export class Session {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

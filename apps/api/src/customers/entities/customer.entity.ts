@@ -1,6 +1,7 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, PrimaryColumn } from 'typeorm';
 
 @Entity('customers')
+@ForeignKey('Company', ['companyId'], ['id'], { name: 'customers_company_id_fkey' })
 export class Customer {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

@@ -1,6 +1,8 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('devices')
+@Index('devices_id', ['id'])
+@ForeignKey('User', ['companyId', 'userId'], ['companyId', 'id'], { name: 'devices_company_id_user_id_fkey' })
 export class Device {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

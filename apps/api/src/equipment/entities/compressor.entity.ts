@@ -1,6 +1,7 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, PrimaryColumn } from 'typeorm';
 
 @Entity('compressors')
+@ForeignKey('Company', ['companyId'], ['id'], { name: 'compressors_company_id_fkey' })
 export class Compressor {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

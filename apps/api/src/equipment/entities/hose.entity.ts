@@ -1,6 +1,7 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, PrimaryColumn } from 'typeorm';
 
 @Entity('hoses')
+@ForeignKey('Company', ['companyId'], ['id'], { name: 'hoses_company_id_fkey' })
 export class Hose {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

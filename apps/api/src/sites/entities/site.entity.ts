@@ -1,6 +1,9 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, PrimaryColumn } from 'typeorm';
 
 @Entity('sites')
+@ForeignKey('Customer', ['companyId', 'customerId'], ['companyId', 'id'], {
+  name: 'sites_company_id_customer_id_fkey',
+})
 export class Site {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

@@ -1,7 +1,9 @@
 import type { System as SystemDescription } from '@rimeward/field-log';
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('systems')
+@Index('systems_by_site', ['companyId', 'siteId'])
+@ForeignKey('Site', ['companyId', 'siteId'], ['companyId', 'id'], { name: 'systems_company_id_site_id_fkey' })
 export class System {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

@@ -1,7 +1,11 @@
 import type { Language, Role } from '@rimeward/contracts';
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('users')
+@Index('users_by_email', ['companyId', 'email'], { unique: true })
+@Index('users_email', ['email'])
+@ForeignKey('Company', ['companyId'], ['id'], { name: 'users_company_id_fkey' })
+@ForeignKey('Crew', ['companyId', 'crewId'], ['companyId', 'id'], { name: 'users_company_id_crew_id_fkey' })
 export class User {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

@@ -1,6 +1,10 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('visit_summaries')
+@Index('visit_summaries_by_system', ['companyId', 'systemId', 'date'])
+@ForeignKey('System', ['companyId', 'systemId'], ['companyId', 'id'], {
+  name: 'visit_summaries_company_id_system_id_fkey',
+})
 export class VisitSummary {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;

@@ -1,6 +1,12 @@
-import { Column, Entity, PrimaryColumn } from 'typeorm';
+import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 
 @Entity('visits')
+@Index('visits_by_date', ['companyId', 'date'])
+@ForeignKey('Site', ['companyId', 'siteId'], ['companyId', 'id'], { name: 'visits_company_id_site_id_fkey' })
+@ForeignKey('System', ['companyId', 'systemId'], ['companyId', 'id'], {
+  name: 'visits_company_id_system_id_fkey',
+})
+@ForeignKey('Crew', ['companyId', 'crewId'], ['companyId', 'id'], { name: 'visits_company_id_crew_id_fkey' })
 export class Visit {
   @PrimaryColumn('uuid', { name: 'company_id' })
   companyId: string;
