@@ -87,6 +87,17 @@ export class TestPhone {
     return { status: answer.status, body: (await answer.json()) as PushResponse };
   }
 
+  /** Any request with the credential of the device. */
+  async send<T>(path: string, body?: string | FormData, type?: string): Promise<Answer<T>> {
+    const headers = { authorization: this.authorization, ...(type && { 'content-type': type }) };
+    const answer = await fetch(`${this.owner.url}/api${path}`, {
+      method: 'POST',
+      headers,
+      body: body ?? null,
+    });
+    return { status: answer.status, body: (await answer.json()) as T };
+  }
+
   manifest(pending: number): Record<string, unknown> {
     return {
       head: this.head.seq,
