@@ -7,3 +7,5 @@ export * from './input';
 export { findings } from './findings';
 export { rules, rulesById, RULES_VERSION } from './registry';
 export * from './thresholds';
+export { sentence, type RulesLanguage } from './texts/sentence';
+export type { Reader } from './texts/say';

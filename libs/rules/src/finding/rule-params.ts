@@ -1,23 +1,23 @@
 import type { CeilingSource } from '../facts/ceilings';
 
-interface OfZone {
+type OfZone = {
   zoneNumber: number;
   zoneName: string;
-}
-interface OfPart {
+};
+type OfPart = {
   part: string;
-}
-interface OfDevice {
+};
+type OfDevice = {
   device: string;
-}
+};
 /** `said`: somebody wrote down that it is so; `not-recorded`: nobody wrote anything. */
-interface SaidOrNot {
+type SaidOrNot = {
   how: 'said' | 'not-recorded';
-}
+};
 /** `late`: done, but after the first air; `never`: not done at all. */
-interface LateOrNever {
+type LateOrNever = {
   how: 'late' | 'never';
-}
+};
 
 /** Every rule by its stable id, with the figures that its sentence is made from: US units, the unit in the name. */
 export interface RuleParams {

@@ -35,10 +35,10 @@ export const hoseOffUnderPressure: Rule<'hose-off-under-pressure'> = {
   basis: commonPractice,
   find({ standing, firstAir, placeOf }, report) {
     if (!firstAir) return;
-    const last = (step: string) =>
-      standing.findLast(({ entry }) => entry.type === 'air-closed-down' && entry.body.step === step)?.entry;
-    const off = last('hose-off');
-    const bled = last('hose-bled');
+    const firstOf = (step: string) =>
+      standing.find(({ entry }) => entry.type === 'air-closed-down' && entry.body.step === step)?.entry;
+    const off = firstOf('hose-off');
+    const bled = firstOf('hose-bled');
     if (off && bled && placeOf(off.id) < placeOf(bled.id)) report([off.id, bled.id], {});
   },
 };
