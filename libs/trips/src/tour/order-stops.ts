@@ -8,7 +8,7 @@ import { scheduleOf, type DaySchedule } from './day-schedule';
 import { shortestTour, type TourEnd } from './shortest-tour';
 import { exactTimedOrder, exactTimedStops } from './timed/exact-timed-order';
 import { searchTimedOrder } from './timed/search-timed-order';
-import { weighOrder, type TimedDay } from './timed/timed-day';
+import type { TimedDay } from './timed/timed-day';
 
 /** A day's stops in order, its hours, and how they were found. */
 export interface DayOrder extends DaySchedule {
@@ -21,7 +21,7 @@ export interface DayOrder extends DaySchedule {
 
 /**
  * Puts a day's stops in order. Without time windows the least driving; with windows the least late, then the
- * shortest day with little driving. Exact up to 12 stops (9 with windows); beyond, a repeatable search that is never
+ * shortest day with little driving. Exact for small days (13 places besides the yard, 9 stops with windows); beyond, a repeatable search that is never
  * worse than the order given. A window that cannot be kept is reported at its stop, never dropped.
  */
 export function orderStops(request: DayRequest): Result<DayOrder> {
@@ -68,8 +68,7 @@ function timedOrder(day: TimedDay, given: number[], driving: number[], random: R
   if (day.stops <= exactTimedStops) return { order: exactTimedOrder(day), method: 'exact' };
   const closes = (place: number): number => day.closesMinute[place] as number;
   const byWindow = [...driving].sort((a, b) => (closes(a) === closes(b) ? 0 : closes(a) - closes(b)));
-  const found = searchTimedOrder(day, [given, driving, byWindow], random);
-  return { order: weighOrder(day, found) <= weighOrder(day, given) ? found : given, method: 'search' };
+  return { order: searchTimedOrder(day, [given, driving, byWindow], random), method: 'search' };
 }
 
 function explain(request: DayRequest, { travel, end }: DayPlaces, timed: boolean): Explanation {

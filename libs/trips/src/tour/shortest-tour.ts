@@ -25,7 +25,7 @@ export interface Tour {
 }
 
 /**
- * A short tour from place 0 through all places: exact up to 12 places besides the start, a repeatable search beyond.
+ * A short tour from place 0 through all places: exact up to 13 places besides the start, a repeatable search beyond.
  * Costs have to be the same both ways. Never longer than the given order.
  */
 export function shortestTour(costs: CostMatrix, options: TourOptions): Result<Tour> {
