@@ -21,7 +21,9 @@ export function compressAssets(): Plugin {
       sequential: true,
       async handler() {
         const files = await readdir(outDir, { recursive: true });
-        await Promise.all(files.filter((file) => kinds.test(file)).map((file) => compress(join(outDir, file))));
+        await Promise.all(
+          files.filter((file) => kinds.test(file)).map((file) => compress(join(outDir, file))),
+        );
       },
     },
   };

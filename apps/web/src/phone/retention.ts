@@ -1,5 +1,6 @@
 import { Dexie } from 'dexie';
 import { database, type PhoneDatabase } from './database/database';
+import { lastEntry } from './delivery/chain-marks';
 import type { PhotoState } from './database/schema';
 import { namedPhotos } from './photos/named-photos';
 
@@ -31,32 +32,19 @@ export async function tidy(nowMs = Date.now(), db: PhoneDatabase = database()): 
 }
 
 async function tidyEntries(db: PhoneDatabase, nowMs: number): Promise<void> {
-  for (const chain of await db.chains.toArray()) {
-    await db.transaction('rw', db.entries, db.outbox, db.receipts, async () => {
-      const range = db.receipts.where('[device+through]');
-      const receipts = await range
-        .between([chain.device, Dexie.minKey], [chain.device, Dexie.maxKey])
+  for (const { device, acknowledged } of await db.chains.toArray()) {
+    await db.transaction('rw', db.entries, db.receipts, async () => {
+      const receipts = await db.receipts
+        .where('[device+through]')
+        .between([device, 0], [device, Infinity])
         .toArray();
-      const through = Math.max(
-        0,
-        ...receipts.filter(({ verified }) => verified).map((receipt) => receipt.through),
-      );
-      const entries = db.entries
+      const verified = receipts.filter((receipt) => receipt.verified).map(({ through }) => through);
+      const head = await lastEntry(db, device);
+      const through = Math.min(Math.max(0, ...verified), acknowledged.seq, (head?.seq ?? 1) - 1);
+      await db.entries
         .where('[device+seq]')
-        .between([chain.device, Dexie.minKey], [chain.device, through], true, true);
-      const unsent = new Set(
-        (
-          await db.outbox
-            .where('[device+seq]')
-            .between([chain.device, Dexie.minKey], [chain.device, through], true, true)
-            .primaryKeys()
-        ).map(([, seq]) => seq),
-      );
-      await entries
-        .and(
-          (row) =>
-            nowMs - row.savedMs > keepEntriesMs && row.heldReason === undefined && !unsent.has(row.seq),
-        )
+        .between([device, 0], [device, through], true, true)
+        .and((row) => nowMs - row.savedMs > keepEntriesMs && row.heldReason === undefined)
         .delete();
     });
   }

@@ -11,7 +11,7 @@ import { deliveryStatus, type DeliveryStatus } from '../../phone/delivery/status
 import { downloadBundle } from '../../phone/export/bundle';
 import { outboxItems } from '../../phone/queries/outbox';
 import { OutboxRow } from './OutboxRow';
-import { sizeText } from './size-text';
+import { sizeText } from '../../app/format/size-text';
 import { StorageLine } from './StorageLine';
 
 /** What has not reached the office, why, how big; deliver by hand; save a copy. */

@@ -4,7 +4,7 @@ import { useTranslation } from 'react-i18next';
 import { useDates } from '../../app/i18n/use-dates';
 import { StatusWord } from '../../components/StatusWord';
 import type { OutboxItem } from '../../phone/queries/outbox';
-import { sizeText } from './size-text';
+import { sizeText } from '../../app/format/size-text';
 
 const shapes = {
   'on-this-phone': 'todo',

@@ -2,7 +2,7 @@ import Typography from '@mui/material/Typography';
 import { useEffect, useState } from 'react';
 import { useTranslation } from 'react-i18next';
 import { storageStanding } from '../../phone/storage';
-import { sizeText } from './size-text';
+import { sizeText } from '../../app/format/size-text';
 
 type Standing = Awaited<ReturnType<typeof storageStanding>>;
 

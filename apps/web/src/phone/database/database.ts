@@ -13,7 +13,6 @@ export class PhoneDatabase extends Dexie {
   declare devices: EntityTable<rows.Enrolment, 'deviceId'>;
   declare chains: EntityTable<rows.ChainRow, 'device'>;
   declare entries: Table<rows.EntryRow, [string, number]>;
-  declare outbox: Table<rows.OutboxRow, [string, number]>;
   declare photos: Table<rows.PhotoRow, [string, string]>;
   declare chunks: Table<rows.ChunkRow, [string, number]>;
   declare previews: EntityTable<rows.PreviewRow, 'sha256'>;
@@ -28,7 +27,8 @@ export class PhoneDatabase extends Dexie {
   declare read_meta: Table<rows.ReadMetaRow, string>;
 
   constructor(name: string = databaseName) {
-    super(name, { chromeTransactionDurability: 'strict', autoOpen: true });
+    // No cache: its optimistic results would show an entry before it is committed.
+    super(name, { chromeTransactionDurability: 'strict', cache: 'disabled' });
     this.version(1).stores(stores);
   }
 

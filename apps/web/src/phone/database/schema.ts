@@ -10,6 +10,12 @@ export interface MetaRow {
   value: unknown;
 }
 
+/** Row `active` of `meta`: whose phone it is now. */
+export interface ActiveRow extends MetaRow {
+  value: string;
+  owner: Owner;
+}
+
 /** What the office gave this browser's storage when it was enrolled, and who works with it. */
 export interface Enrolment {
   deviceId: string;
@@ -30,9 +36,9 @@ export interface ChainMark extends ChainHead {
   bytesThrough: number;
 }
 
+/** How far the office has acknowledged a device's chain. What comes after it in `entries` is the outbox. */
 export interface ChainRow {
   device: string;
-  head: ChainMark;
   acknowledged: ChainMark;
 }
 
@@ -52,11 +58,6 @@ export interface EntryRow {
   savedMs: number;
   /** Why the office keeps it aside; absent when it does not, so that the index holds only those. */
   heldReason?: string;
-}
-
-export interface OutboxRow {
-  device: string;
-  seq: number;
 }
 
 /**
@@ -164,8 +165,7 @@ export const stores = {
   meta: 'key',
   devices: 'deviceId, owner',
   chains: 'device',
-  entries: '[device+seq], id, [owner+visit], [device+heldReason]',
-  outbox: '[device+seq]',
+  entries: '[device+seq], [owner+visit], [device+heldReason]',
   photos: '[device+sha256], device, sha256, [device+state]',
   chunks: '[sha256+n]',
   previews: 'sha256',

@@ -5,6 +5,7 @@ import { beforeEach, describe, expect, it } from 'vitest';
 import { codec } from '../codec';
 import { database } from '../database/database';
 import type { Enrolment } from '../database/schema';
+import { unsentWork } from '../device/sign-out';
 import { storePhoto } from '../photos/intake';
 import { outboxItems } from '../queries/outbox';
 import { photosOfVisit } from '../queries/photos';
@@ -82,12 +83,12 @@ describe('a round of the phone', () => {
     for (let n = 0; n < 5; n += 1) await saveEntry(noteOf(1, `note ${n}`));
     office.fault = (path) => (path === '/api/sync/push' ? 'lose-answer' : null);
     expect(await runRound(ports, freshMemory())).toMatchObject({ reason: 'no-network', contact: false });
-    expect(await database().outbox.count()).toBe(5);
+    expect((await unsentWork()).entries).toBe(5);
     expect(atTheOffice().length).toBe(5);
     office.fault = () => null;
     await runRound(ports, freshMemory());
     expect(atTheOffice()).toEqual(await texts());
-    expect(await database().outbox.count()).toBe(0);
+    expect((await unsentWork()).entries).toBe(0);
   });
 
   it('loses each answer of a whole delivery once, and still brings everything exactly once', async () => {
@@ -106,7 +107,7 @@ describe('a round of the phone', () => {
     expect(lost.size).toBeGreaterThan(5);
     expect(atTheOffice()).toEqual(await texts());
     expect(office.complete.has(sha256)).toBe(true);
-    expect(await database().outbox.count()).toBe(0);
+    expect((await unsentWork()).entries).toBe(0);
   });
 
   it.each([
@@ -131,7 +132,7 @@ describe('a round of the phone', () => {
     office.fault = () => answer.clone();
     const report = await runRound(ports, freshMemory());
     expect(report).toMatchObject({ reason, retryAfterMs: reason === 'server-busy' ? 7_000 : null });
-    expect(await database().outbox.count()).toBe(1);
+    expect((await unsentWork()).entries).toBe(1);
     expect(await database().receipts.count()).toBe(0);
   });
 
@@ -146,7 +147,7 @@ describe('a round of the phone', () => {
     expect(atTheOffice()).toEqual(await texts());
     await runRound(ports, freshMemory());
     expect(office.complete.size).toBe(1);
-    expect(await database().outbox.count()).toBe(0);
+    expect((await unsentWork()).entries).toBe(0);
   });
 
   it('stops with a reason when the office has other entries under the same numbers', async () => {
@@ -155,7 +156,7 @@ describe('a round of the phone', () => {
     const memory = freshMemory();
     expect((await runRound(ports, memory)).reason).toBe('fork');
     expect(memory.forked).toBe(true);
-    expect(await database().outbox.count()).toBe(1);
+    expect((await unsentWork()).entries).toBe(1);
   });
 
   it('lets one damaged photograph neither block the others nor disappear', async () => {

@@ -1,37 +1,30 @@
-import type { ChainHead, DeliveryStore, HeldEntry } from '@rimeward/delivery';
-import { Dexie } from 'dexie';
+import type { DeliveryStore, HeldEntry } from '@rimeward/delivery';
 import { appVersion } from '../app-version';
 import type { PhoneDatabase } from '../database/database';
-import type { ChainMark, ChainRow } from '../database/schema';
-import { emptyChainRow } from './chain-row';
+import { chainMarks } from './chain-marks';
 
 type EntryCalls = Pick<
   DeliveryStore,
   'standing' | 'manifest' | 'entriesAfter' | 'textAt' | 'acknowledge' | 'noteHeld' | 'rewind'
 >;
 
-/** The entries' side of the delivery store. */
+/**
+ * The entries' side of the delivery store. The outbox is what follows the acknowledged mark: moving the mark, in the
+ * transaction that stores the receipt, is the only way out of it.
+ */
 export function entryOutbox(db: PhoneDatabase, device: string): EntryCalls {
-  const chain = async (): Promise<ChainRow> => (await db.chains.get(device)) ?? emptyChainRow(device);
-
-  const markAt = async ({ seq, hash }: ChainHead): Promise<ChainMark | null> => {
-    if (seq === 0) return emptyChainRow(device).head;
-    const row = await db.entries.get([device, seq]);
-    return row === undefined ? null : { seq, hash, bytesThrough: row.bytesThrough };
-  };
+  const between = (first: number, last: number) =>
+    db.entries.where('[device+seq]').between([device, first], [device, last], true, true);
 
   const noteHeld = async (held: readonly HeldEntry[]): Promise<void> => {
     for (const { seq, reason } of held) await db.entries.update([device, seq], { heldReason: reason });
   };
 
   return {
-    standing: async () => {
-      const { head, acknowledged } = await chain();
-      return { device, head, acknowledged };
-    },
+    standing: async () => ({ device, ...(await chainMarks(db, device)) }),
     manifest: () =>
       db.transaction('r', db.chains, db.entries, db.photos, async () => {
-        const { head, acknowledged } = await chain();
+        const { head, acknowledged } = await chainMarks(db, device);
         const oldest = await db.entries.get([device, acknowledged.seq + 1]);
         const photos = await db.photos.where({ device, state: 'pending' }).toArray();
         const photoBytes = photos.reduce((sum, photo) => sum + photo.bytes, 0);
@@ -45,60 +38,39 @@ export function entryOutbox(db: PhoneDatabase, device: string): EntryCalls {
         };
       }),
     entriesAfter: async (seq, limit) => {
-      const rows = await db.entries
-        .where('[device+seq]')
-        .between([device, seq + 1], [device, seq + limit], true, true)
-        .toArray();
-      const dense = rows.findIndex((row, index) => row.seq !== seq + 1 + index);
-      return rows
-        .slice(0, dense === -1 ? rows.length : dense)
-        .map((row) => ({ seq: row.seq, text: row.text }));
+      const rows = await between(seq + 1, seq + limit).toArray();
+      const gap = rows.findIndex((row, index) => row.seq !== seq + 1 + index);
+      return rows.slice(0, gap === -1 ? rows.length : gap).map((row) => ({ seq: row.seq, text: row.text }));
     },
     textAt: async (seq) => (await db.entries.get([device, seq]))?.text ?? null,
     acknowledge: ({ through, receipt, receiptVerified, held, atMs }) =>
-      db.transaction('rw', db.chains, db.entries, db.outbox, db.receipts, async () => {
-        const row = await chain();
+      db.transaction('rw', db.chains, db.entries, db.receipts, async () => {
+        const { acknowledged } = await chainMarks(db, device);
         await noteHeld(held);
-        if (through.seq < row.acknowledged.seq) return;
-        await db.receipts.put({
-          device,
-          through: through.seq,
-          hash: through.hash,
-          receipt,
-          verified: receiptVerified,
-          atMs,
-        });
-        await db.outbox
-          .where('[device+seq]')
-          .between([device, Dexie.minKey], [device, through.seq], true, true)
-          .delete();
-        const acknowledged = (await markAt(through)) ?? { ...row.acknowledged, ...through };
-        await db.chains.put({ ...row, acknowledged });
+        if (through.seq < acknowledged.seq) return;
+        const { seq, hash } = through;
+        await db.receipts.put({ device, through: seq, hash, receipt, verified: receiptVerified, atMs });
+        const row = await db.entries.get([device, seq]);
+        const bytesThrough = row?.bytesThrough ?? acknowledged.bytesThrough;
+        await db.chains.put({ device, acknowledged: { seq, hash, bytesThrough } });
         if (!receiptVerified) return;
         // A verified receipt covers everything before it.
-        const older = db.receipts
-          .where('[device+through]')
-          .between([device, Dexie.minKey], [device, through.seq], true, false);
-        await older.delete();
+        await db.receipts.where('[device+through]').between([device, 0], [device, seq], true, false).delete();
       }),
     noteHeld: (held) => db.transaction('rw', db.entries, () => noteHeld(held)),
     rewind: (from, to) =>
-      db.transaction('rw', db.chains, db.entries, db.outbox, db.receipts, async () => {
-        const row = await chain();
-        if (row.acknowledged.seq !== from.seq) return true;
+      db.transaction('rw', db.chains, db.entries, db.receipts, async () => {
+        const { acknowledged } = await chainMarks(db, device);
+        if (acknowledged.seq !== from.seq) return true;
         const next = await db.entries.get([device, to.seq + 1]);
-        const kept = await db.entries
-          .where('[device+seq]')
-          .between([device, to.seq + 1], [device, from.seq], true, true)
-          .primaryKeys();
-        if (next === undefined || kept.length !== from.seq - to.seq) return false;
-        const acknowledged = { ...to, bytesThrough: next.bytesThrough - next.byteLength };
-        await db.outbox.bulkPut(kept.map(([, seq]) => ({ device, seq })));
+        if (next === undefined || (await between(to.seq + 1, from.seq).count()) !== from.seq - to.seq)
+          return false;
+        const bytesThrough = next.bytesThrough - next.byteLength;
         await db.receipts
           .where('[device+through]')
-          .between([device, to.seq], [device, Dexie.maxKey], false, true)
+          .between([device, to.seq], [device, Infinity], false, true)
           .delete();
-        await db.chains.put({ ...row, acknowledged });
+        await db.chains.put({ device, acknowledged: { ...to, bytesThrough } });
         return true;
       }),
   };

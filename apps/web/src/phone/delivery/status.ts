@@ -2,6 +2,7 @@ import type { StuckReason } from '@rimeward/delivery';
 import { database } from '../database/database';
 import { activeEnrolment } from '../device/enrolment';
 import { unsentWork } from '../device/sign-out';
+import { chainMarks } from './chain-marks';
 import { readProgress } from './progress';
 
 /** Where one item stands, in the words that the screens translate. */
@@ -48,8 +49,8 @@ function phaseOf(active: boolean, phase: 'sending' | 'waiting', pending: boolean
 }
 
 async function oldestPendingMs(device: string): Promise<number | null> {
-  const chain = await database().chains.get(device);
-  if (chain === undefined || chain.head.seq <= chain.acknowledged.seq) return null;
-  const oldest = await database().entries.get([device, chain.acknowledged.seq + 1]);
+  const { head, acknowledged } = await chainMarks(database(), device);
+  if (head.seq <= acknowledged.seq) return null;
+  const oldest = await database().entries.get([device, acknowledged.seq + 1]);
   return oldest?.savedMs ?? null;
 }

@@ -5,7 +5,7 @@ import { databaseFault, type DatabaseFault } from '../database/faults';
 import type { Enrolment } from '../database/schema';
 import { jsonBody, type Fetcher } from '../session/api-fetch';
 import { rawFetch } from '../session/raw-fetch';
-import { activeEnrolment, activeKey, ownerOf } from './enrolment';
+import { activeEnrolment, ownerOf, setActive } from './enrolment';
 import { renewLease } from './lease';
 import { dropReadData } from './sign-out';
 
@@ -37,7 +37,7 @@ async function enter(db: PhoneDatabase, session: Session, fetcher: Fetcher): Pro
   const enrolment = { ...device, owner, user: session.user, company: session.company };
   await db.transaction('rw', db.devices, db.meta, async () => {
     await db.devices.put(enrolment);
-    await db.meta.put({ key: activeKey, value: enrolment.deviceId });
+    await setActive(db, enrolment);
     const nowMs = Date.parse(session.serverTime);
     const value = { offsetMs: nowMs - Date.now(), estimatedAtMs: Date.now(), latestSeenMs: nowMs };
     await db.meta.put({ key: clockKey, value });

@@ -1,6 +1,6 @@
 import type { Session } from '@rimeward/contracts';
 import { database, type PhoneDatabase } from '../database/database';
-import type { Enrolment, Owner } from '../database/schema';
+import type { ActiveRow, Enrolment, Owner } from '../database/schema';
 
 export type { Enrolment } from '../database/schema';
 
@@ -15,6 +15,12 @@ export async function activeEnrolment(db: PhoneDatabase = database()): Promise<E
   const active = await db.meta.get(activeKey);
   if (typeof active?.value !== 'string') return null;
   return (await db.devices.get(active.value)) ?? null;
+}
+
+/** Makes the person of this enrolment the active one. */
+export async function setActive(db: PhoneDatabase, { deviceId, owner }: Enrolment): Promise<void> {
+  const row: ActiveRow = { key: activeKey, value: deviceId, owner };
+  await db.meta.put(row);
 }
 
 /** Takes newer names, role, language and settings from a session of the person who is active; any other is ignored. */

@@ -1,4 +1,5 @@
 import { database, type PhoneDatabase } from '../database/database';
+import { chainMarks } from '../delivery/chain-marks';
 import { activeEnrolment, activeKey } from './enrolment';
 
 export interface UnsentWork {
@@ -15,16 +16,16 @@ export async function unsentWork(db: PhoneDatabase = database()): Promise<Unsent
   const enrolment = await activeEnrolment(db);
   if (enrolment === null) return { entries: 0, photos: 0, bytes: 0, held: 0 };
   const device = enrolment.deviceId;
-  const [chain, photos, held] = await Promise.all([
-    db.chains.get(device),
+  const [{ head, acknowledged }, photos, held] = await Promise.all([
+    chainMarks(db, device),
     db.photos.where({ device, state: 'pending' }).toArray(),
     db.entries.where('[device+heldReason]').between([device, ''], [device, '\uffff']).count(),
   ]);
-  const entryBytes = chain === undefined ? 0 : chain.head.bytesThrough - chain.acknowledged.bytesThrough;
   return {
-    entries: chain === undefined ? 0 : chain.head.seq - chain.acknowledged.seq,
+    entries: head.seq - acknowledged.seq,
     photos: photos.length,
-    bytes: entryBytes + photos.reduce((sum, photo) => sum + photo.bytes, 0),
+    bytes:
+      head.bytesThrough - acknowledged.bytesThrough + photos.reduce((sum, photo) => sum + photo.bytes, 0),
     held,
   };
 }

@@ -103,16 +103,24 @@ describe('tidy', () => {
     if (!stored.ok) throw new Error(stored.fault);
     await saveEntry(noteOf(1, 'one', [stored.photo]));
     await saveEntry(noteOf(1, 'two'));
-    await database().outbox.clear();
+    await saveEntry(noteOf(1, 'three'));
+    await database().chains.put({ device, acknowledged: { seq: 2, hash: 'b', bytesThrough: 0 } });
     await database().photos.toCollection().modify({ state: 'complete', settledMs: Date.now() });
     const receipt = { device, through: 1, hash: 'a', receipt: 'r', verified: false, atMs: Date.now() };
     await database().receipts.put(receipt);
     await tidy(Date.now() + 40 * day);
-    expect(await counts()).toEqual([0, 0, 2]);
+    expect(await counts()).toEqual([0, 0, 3]);
     await database().receipts.put({ ...receipt, verified: true });
     await tidy(Date.now() + 29 * day);
-    expect((await counts())[2]).toBe(2);
+    expect((await counts())[2]).toBe(3);
     await tidy(Date.now() + 31 * day);
-    expect((await database().entries.toArray()).map(({ seq }) => seq)).toEqual([2]);
+    expect((await database().entries.toArray()).map(({ seq }) => seq)).toEqual([2, 3]);
+    // The newest entry is the head of the chain: it stays whatever covers it.
+    await database().chains.put({ device, acknowledged: { seq: 3, hash: 'c', bytesThrough: 0 } });
+    await database().receipts.put({ ...receipt, through: 3, verified: true });
+    await tidy(Date.now() + 31 * day);
+    expect((await database().entries.toArray()).map(({ seq }) => seq)).toEqual([3]);
+    await saveEntry(noteOf(1, 'four'));
+    expect((await database().entries.toArray()).map(({ seq }) => seq)).toEqual([3, 4]);
   });
 });

@@ -9,7 +9,7 @@ import { readReceipt } from '../delivery/receipt';
 import { deliveryStore } from '../delivery/store';
 import { httpTransport } from '../delivery/transport';
 import { leaseStanding } from '../device/lease';
-import { lockOnSignOut } from '../device/sign-out';
+import { lockOnSignOut, unsentWork } from '../device/sign-out';
 import { siteAccess } from '../queries/access';
 import { entriesOfVisit, reviewsOfVisit, unreadableOfVisit } from '../queries/entries';
 import { openQuestions } from '../queries/open-questions';
@@ -174,10 +174,11 @@ describe('what was pulled', () => {
     await lockOnSignOut();
     const left = await Promise.all([...database().readTables, database().keys].map((table) => table.count()));
     expect(left).toEqual([0, 0, 0, 0, 0]);
-    expect(await database().outbox.count()).toBe(1);
+    expect((await unsentWork()).entries).toBe(0);
     await enrolTechnician(2);
     expect(await entriesOfVisit(visitId)).toEqual([]);
     await enrolTechnician(1);
+    expect((await unsentWork()).entries).toBe(1);
     expect((await entriesOfVisit(visitId)).length).toBe(1);
   });
 

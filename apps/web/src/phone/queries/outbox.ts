@@ -1,6 +1,7 @@
 import type { EntryType } from '@rimeward/field-log';
 import { database } from '../database/database';
 import type { EntryRow, PhotoRow } from '../database/schema';
+import { chainMarks } from '../delivery/chain-marks';
 import { readProgress } from '../delivery/progress';
 import type { Standing } from '../delivery/status';
 import { activeEnrolment } from '../device/enrolment';
@@ -35,13 +36,13 @@ export async function outboxItems(limit = 500): Promise<OutboxItem[]> {
   if (enrolment === null) return [];
   const db = database();
   const device = enrolment.deviceId;
-  const unsentKeys = await db.outbox
-    .where('[device+seq]')
-    .between([device, 0], [device, Infinity])
-    .limit(limit)
-    .primaryKeys();
+  const { acknowledged } = await chainMarks(db, device);
   const [unsent, held, photos, progress] = await Promise.all([
-    db.entries.bulkGet(unsentKeys),
+    db.entries
+      .where('[device+seq]')
+      .between([device, acknowledged.seq], [device, Infinity], false)
+      .limit(limit)
+      .toArray(),
     db.entries.where('[device+heldReason]').between([device, ''], [device, '\uffff']).limit(limit).toArray(),
     db.photos
       .where('[device+state]')
@@ -53,7 +54,7 @@ export async function outboxItems(limit = 500): Promise<OutboxItem[]> {
   const sending = progress?.device === device && progress.phase === 'sending' && progress.reason === null;
   const waiting: Standing = sending ? 'on-its-way' : 'on-this-phone';
   return [
-    ...unsent.flatMap((row) => (row === undefined ? [] : [entryItem(row, waiting)])),
+    ...unsent.map((row) => entryItem(row, waiting)),
     ...photos.map((row) => photoItem(row, waiting)),
     ...held.map((row) => entryItem(row, 'held')),
   ];

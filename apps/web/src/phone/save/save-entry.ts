@@ -1,24 +1,17 @@
-import { sealEntry } from '@rimeward/delivery';
 import type { LogEntry } from '@rimeward/field-log';
-import { clockKey, clockOf } from '../clock/known-time';
-import { codec } from '../codec';
-import { database, type PhoneDatabase } from '../database/database';
+import { database } from '../database/database';
 import { databaseFault, type DatabaseFault } from '../database/faults';
 import { openPhone } from '../database/open-phone';
-import type { EntryRow } from '../database/schema';
-import { emptyChainRow } from '../delivery/chain-row';
 import { wakeDelivery } from '../delivery/wake';
-import { activeKey, ownerOf } from '../device/enrolment';
 import { afterSave } from './after-save';
 import { dropBallast } from './ballast';
-import { entryDraft, type NewEntry } from './entry-draft';
+import type { NewEntry } from './entry-draft';
+import { SaveRefused, writeEntry, type Refusal } from './entry-transaction';
+import { tellLiveQueries } from './tell-live-queries';
 
 export type { NewEntry } from './entry-draft';
 
-/** Longest text that the office takes as one entry, UTF-16 units. */
-const longestText = 64 * 1024;
-
-export type SaveFault = 'not-enrolled' | 'other-person' | 'photo-missing' | 'too-large' | DatabaseFault;
+export type SaveFault = Refusal | DatabaseFault;
 
 export type SaveResult = { ok: true; entry: LogEntry } | { ok: false; fault: SaveFault };
 
@@ -39,18 +32,13 @@ export async function saveEntry(entry: NewEntry): Promise<SaveResult> {
   return result;
 }
 
-async function freeRoom(): Promise<boolean> {
-  try {
-    return await dropBallast();
-  } catch (error) {
-    if (databaseFault(error) === null) throw error;
-    return false;
-  }
-}
-
 async function attempt(entry: NewEntry): Promise<SaveResult> {
   try {
-    return await write(database(), entry, Date.now());
+    const db = database();
+    if (!db.isOpen()) await db.open();
+    const written = await writeEntry(db.backendDB(), entry, Date.now());
+    tellLiveQueries(db, written);
+    return { ok: true, entry: written.row.entry };
   } catch (error) {
     if (error instanceof SaveRefused) return { ok: false, fault: error.fault };
     const fault = databaseFault(error);
@@ -59,71 +47,11 @@ async function attempt(entry: NewEntry): Promise<SaveResult> {
   }
 }
 
-/** Thrown inside the transaction so that nothing of it stays. */
-class SaveRefused extends Error {
-  constructor(readonly fault: SaveFault) {
-    super(fault);
+async function freeRoom(): Promise<boolean> {
+  try {
+    return await dropBallast();
+  } catch (error) {
+    if (databaseFault(error) === null) throw error;
+    return false;
   }
-}
-
-/**
- * One transaction: read the head, seal, write entry, outbox row, photographs' state and new head. Sealing happens inside
- * it, which synchronous hashing allows: two tabs can then neither take one number nor have to try again.
- */
-function write(db: PhoneDatabase, entry: NewEntry, wallMs: number): Promise<SaveResult> {
-  const photos = entry.photos ?? [];
-  const tables = [
-    db.meta,
-    db.devices,
-    db.chains,
-    db.entries,
-    db.outbox,
-    ...(photos.length > 0 ? [db.photos] : []),
-  ];
-  return db.transaction('rw', tables, async (): Promise<SaveResult> => {
-    const [active, clock] = await db.meta.bulkGet([activeKey, clockKey]);
-    if (typeof active?.value !== 'string') throw new SaveRefused('not-enrolled');
-    const device = active.value;
-    const owner = ownerOf(entry.company, entry.actor);
-    const [enrolment, chain = emptyChainRow(device)] = await Promise.all([
-      db.devices.get(device),
-      db.chains.get(device),
-    ]);
-    if (enrolment?.owner !== owner) throw new SaveRefused('other-person');
-
-    const sealed = sealEntry(entryDraft(entry, device, clockOf(clock), wallMs), chain.head, codec);
-    if (sealed.text.length > longestText) throw new SaveRefused('too-large');
-    const parsed = JSON.parse(sealed.text) as LogEntry;
-    const row: EntryRow = {
-      device,
-      seq: sealed.seq,
-      id: parsed.id,
-      owner,
-      visit: entry.visit,
-      text: sealed.text,
-      hash: sealed.hash,
-      byteLength: sealed.byteLength,
-      bytesThrough: chain.head.bytesThrough + sealed.byteLength,
-      entry: parsed,
-      savedMs: wallMs,
-    };
-    const head = { seq: row.seq, hash: row.hash, bytesThrough: row.bytesThrough };
-    await Promise.all([
-      db.entries.add(row),
-      db.outbox.add({ device, seq: row.seq }),
-      db.chains.put({ ...chain, head }),
-      ...photos.map(({ sha256 }) => nameInEntry(db, device, sha256, entry.visit)),
-    ]);
-    return { ok: true, entry: parsed };
-  });
-}
-
-async function nameInEntry(db: PhoneDatabase, device: string, sha256: string, visit: string): Promise<void> {
-  const photo = await db.photos.get([device, sha256]);
-  if (photo === undefined || photo.state === 'storing') throw new SaveRefused('photo-missing');
-  await db.photos.put({
-    ...photo,
-    visit: photo.visit ?? visit,
-    state: photo.state === 'loose' ? 'pending' : photo.state,
-  });
 }

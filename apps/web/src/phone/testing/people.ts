@@ -1,7 +1,7 @@
 import type { Session } from '@rimeward/contracts';
 import { database } from '../database/database';
 import type { Enrolment } from '../database/schema';
-import { activeKey, ownerOf } from '../device/enrolment';
+import { ownerOf, setActive } from '../device/enrolment';
 
 export const companyId = '018f6b2a-0000-7000-8000-00000000c001';
 export const visitId = '018f6b2a-0000-7000-8000-00000000a001';
@@ -50,7 +50,7 @@ export async function enrolTechnician(n: number, device: Partial<Enrolment> = {}
     ...device,
   };
   await database().devices.put(enrolment);
-  await database().meta.put({ key: activeKey, value: enrolment.deviceId });
+  await setActive(database(), enrolment);
   return enrolment;
 }
 

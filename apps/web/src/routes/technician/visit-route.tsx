@@ -15,11 +15,14 @@ import { WaterStep } from '../../features/visit/steps/WaterStep';
 import { WinterStep } from '../../features/visit/steps/WinterStep';
 import { VisitHome } from '../../features/visit/VisitHome';
 import { addTexts } from '../../app/i18n/i18n';
+import logEn from '../../app/log-words/texts.en';
+import logEs from '../../app/log-words/texts.es';
 import en from '../../features/visit/texts.en';
 import es from '../../features/visit/texts.es';
 export { RouteFault as ErrorBoundary } from '../../app/RouteFault';
 
 addTexts('visit', { en, es });
+addTexts('log', { en: logEn, es: logEs });
 
 /** One visit on the phone: the list of work, or one step of it. Everything below reads the same visit log. */
 export function Component() {

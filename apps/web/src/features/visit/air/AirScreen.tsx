@@ -10,7 +10,7 @@ import { ChoiceTiles } from '../../../components/ChoiceTiles';
 import { useVisitLog } from '../log/visit-log';
 import { StepScreen } from '../steps/StepScreen';
 import { AirButton } from './AirButton';
-import { clockText } from './cycle-clock';
+import { clockText } from '../../../app/format/clock-text';
 import { capMs, restMs } from './cycle-plan';
 import { GaugePad } from './GaugePad';
 import { InterlockList } from './InterlockList';

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { clockText, elapsedBySteadyClock } from './cycle-clock';
+import { elapsedBySteadyClock } from './cycle-clock';
 
 describe('length of a cycle by the steady clock', () => {
   const mark = { cycleId: 'a', steadyMs: 1_000, wallMs: 50_000 };
@@ -17,11 +17,5 @@ describe('length of a cycle by the steady clock', () => {
     expect(elapsedBySteadyClock(mark, 'b', { steadyMs: 61_000, wallMs: 110_000 })).toBeNull();
     expect(elapsedBySteadyClock(null, 'a', { steadyMs: 61_000, wallMs: 110_000 })).toBeNull();
     expect(elapsedBySteadyClock(mark, 'a', { steadyMs: 10, wallMs: 49_010 })).toBeNull();
-  });
-});
-
-describe('clock text', () => {
-  it('writes minutes and seconds', () => {
-    expect([0, 999, 61_000, 3_600_000, -5].map(clockText)).toEqual(['0:00', '0:00', '1:01', '60:00', '0:00']);
   });
 });

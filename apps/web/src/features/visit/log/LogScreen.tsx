@@ -32,6 +32,7 @@ export function LogScreen() {
 
 function LogRow({ folded }: { folded: FoldedEntry }) {
   const { t } = useTranslation('visit');
+  const { t: words } = useTranslation('log');
   const dates = useDates();
   const { nameOf } = useVisitLog();
   const [open, setOpen] = useState(false);
@@ -46,7 +47,7 @@ function LogRow({ folded }: { folded: FoldedEntry }) {
         sx={{ justifyContent: 'flex-start' }}
       >
         <Typography sx={{ textAlign: 'left', textDecoration: struck ? 'line-through' : 'none' }}>
-          {`${dates.time(folded.atMs)} · ${t(`entryNames.${entry.type}`)} · ${nameOf(entry.actor)}`}
+          {`${dates.time(folded.atMs)} · ${words(`entries.${entry.type}`)} · ${nameOf(entry.actor)}`}
         </Typography>
       </Button>
       {corrections.map((correction) => (
