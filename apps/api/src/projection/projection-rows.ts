@@ -21,7 +21,9 @@ const columns = [
   'zones_done',
   'zones_total',
   'held_entries',
+  'arrived_at',
   'left_at',
+  'at_the_end',
   'position',
 ];
 
@@ -52,7 +54,9 @@ export async function saveProjection(manager: EntityManager, projection: Project
     projection.zonesDone,
     projection.zonesTotal,
     projection.heldEntries,
+    projection.arrivedAt,
     projection.leftAt,
+    projection.atTheEnd,
     projection.position,
   ]);
   if (rows.length !== 1) throw new Error('a projection was not written');

@@ -6,6 +6,7 @@ export interface VisitFigures {
   cycles: number;
   zonesDone: number;
   zonesTotal: number;
+  arrivedAt: string | null;
   leftAt: string | null;
 }
 
@@ -15,6 +16,7 @@ export function figuresOf(document: VisitDocument, state: VisitState): VisitFigu
     cycles: zones.reduce((sum, zone) => sum + zone.cycles.length, 0),
     zonesDone: zones.filter(isDone).length,
     zonesTotal: document.system.zones.length,
+    arrivedAt: state.arrived === null ? null : instant(state.arrived.atMs),
     leftAt: state.left === null ? null : instant(state.left.atMs),
   };
 }
@@ -40,6 +42,7 @@ export interface Projection extends VisitFigures {
   standing: VisitStanding;
   findings: Finding[];
   rulesVersion: string;
+  atTheEnd: boolean;
   actorIds: string[];
   heldEntries: number;
   position: number;

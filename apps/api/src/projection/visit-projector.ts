@@ -26,7 +26,7 @@ export class VisitProjector {
       await saveProjection(manager, {
         document,
         ...figuresOf(document, state),
-        ...judge(document, state),
+        ...(await judge(manager, document, state)),
         standing,
         actorIds: state.actors,
         heldEntries: log.held,
@@ -48,6 +48,7 @@ export class VisitProjector {
       ...figuresOf(document, state),
       findings: [],
       rulesVersion: 'none',
+      atTheEnd: true,
       standing: standingFrom(log, state, await reviewsOf(manager, [visitId])),
       actorIds: [],
       heldEntries: log.held,

@@ -23,11 +23,13 @@ export class RecordService {
       const [document] = await this.documents.documents(manager, [visitId]);
       if (document === undefined) throw new ProblemException('not-found');
       const { standing, reviews, state, log } = await readVisit(manager, visitId);
+      const { findings, rulesVersion } = await judge(manager, document, state);
       return {
         visit: { ...document, reviews },
         standing,
         entries: await entriesOfVisit(manager, visitId),
-        ...judge(document, state),
+        findings,
+        rulesVersion,
         photos: await photosOfVisit(manager, visitId),
         reviews,
         people: await peopleOf(manager, [

@@ -1,5 +1,6 @@
 import type { EntityManager } from 'typeorm';
-import type { FeedService } from '../feed/feed.service';
+import type { FeedChange, FeedService } from '../feed/feed.service';
+import { readHead } from './feed-reader';
 import type { DayRange } from '../visibility/assigned-visits';
 import { companySetting as company } from '../../database/protect-table';
 
@@ -33,7 +34,8 @@ export function shiftDay(isoDate: string, days: number): string {
 
 /**
  * Tells the feed of visits that have come into the window by the passing of days: nothing was written when they did, and a
- * phone that has read past their planning would never hear of them.
+ * phone that has read past their planning would never hear of them. A feed that is still empty gets its first row, since a
+ * reader at position 0 is one who has read nothing.
  */
 export async function tellEntering(
   manager: EntityManager,
@@ -49,5 +51,8 @@ export async function tellEntering(
      order by v.id`,
     [range.to, windowDays],
   );
-  if (rows.length > 0) await feed.touch(manager, ...rows.map(({ id }) => ({ kind: 'visit' as const, id })));
+  const entering: FeedChange[] = rows.map(({ id }) => ({ kind: 'visit', id }));
+  const { position } = await readHead(manager);
+  const changes: FeedChange[] = position === 0 ? [{ kind: 'company' }, ...entering] : entering;
+  if (changes.length > 0) await feed.touch(manager, ...changes);
 }
