@@ -63,3 +63,27 @@ describe('tours against TSPLIB optima (published)', () => {
     expect(closedLength(tsplibCosts('berlin52'), tour)).toBe(7542);
   });
 });
+
+describe('tours against exact optima of an integer program (independent, scipy with HiGHS, versions in the fixture)', () => {
+  const exact = readCsv('exact_optima.csv').map(
+    (row) => [row['instance'] ?? '', Number(row['optimum'])] as const,
+  );
+
+  it('agree with the published optimum of every instance that both have', () => {
+    const both = published.filter(([name]) => exact.some(([other]) => other === name));
+    expect(both.length).toBe(5);
+    for (const [name, , optimum] of both) expect(exact.find(([other]) => other === name)?.[1]).toBe(optimum);
+  });
+
+  for (const [name, optimum] of exact.filter(([instance]) => instance.startsWith('uniform100')))
+    it(`${name}: 100 places by chance, within 2 % of ${optimum} and never below, for three seeds`, () => {
+      const costs = tsplibCosts(name);
+      expect(costs.size).toBe(100);
+      for (const seed of [1, 2, 3]) {
+        const tour = shortestTour(costs, { end: 'closed', random: seededRandom(seed) });
+        if (!tour.ok) throw new Error(JSON.stringify(tour.error));
+        expect(tour.value.length).toBeGreaterThanOrEqual(optimum);
+        expect(tour.value.length).toBeLessThanOrEqual(optimum * 1.02);
+      }
+    });
+});
