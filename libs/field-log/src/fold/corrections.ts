@@ -34,12 +34,12 @@ export function withCorrections(timed: readonly TimedEntry[]): FoldedEntry[] {
     const { standing, body, ignored } = rule(one.entry.type, corrections, effective);
     // A new body has been checked against the entry's own type.
     const entry = body === null ? one.entry : ({ ...one.entry, body } as typeof one.entry);
-    return { entry, atMs: one.atMs, corrections, ignoredCorrections: ignored, standing };
+    return { ...one, entry, corrections, ignoredCorrections: ignored, standing };
   });
 }
 
-function untouched({ entry, atMs }: TimedEntry): FoldedEntry {
-  return { entry, atMs, corrections: [], ignoredCorrections: [], standing: 'standing' };
+function untouched({ entry, atMs, claimedMs }: TimedEntry): FoldedEntry {
+  return { entry, atMs, claimedMs, corrections: [], ignoredCorrections: [], standing: 'standing' };
 }
 
 /** The body by which each standing correction counts; corrections without corrections are settled first. */

@@ -3,7 +3,10 @@ import type { LogEntry } from '../entry/log-entry';
 /** An entry with its estimated true time, ms since the epoch. */
 export interface TimedEntry {
   entry: LogEntry;
+  /** The estimate that orders the log: it never decreases along a device. */
   atMs: number;
+  /** The estimate as this entry alone claims it; before `atMs` where the clock was set back. */
+  claimedMs: number;
 }
 
 /**
@@ -25,8 +28,9 @@ export function inLogOrder(entries: readonly LogEntry[]): TimedEntry[] {
   for (const chain of byDevice.values()) {
     let latest = Number.NEGATIVE_INFINITY;
     for (const entry of chain.values()) {
-      latest = Math.max(latest, estimatedMs(entry));
-      timed.push({ entry, atMs: latest });
+      const claimedMs = estimatedMs(entry);
+      latest = Math.max(latest, claimedMs);
+      timed.push({ entry, atMs: latest, claimedMs });
     }
   }
   return timed.sort(

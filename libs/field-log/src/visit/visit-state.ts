@@ -53,6 +53,8 @@ export interface FoldedEntry {
   entry: LogEntry;
   /** Estimated true time, never decreasing along one device's sequence. */
   atMs: number;
+  /** The time as this entry alone claims it; earlier than `atMs` where the clock was set back. */
+  claimedMs: number;
   corrections: LogEntryOf<'corrected'>[];
   /** Ids of corrections whose new body is not one of this entry's type; they change nothing and a person looks at them. */
   ignoredCorrections: string[];

@@ -1,14 +1,14 @@
-import { estimatedMs, type LogEntry } from '@rimeward/field-log';
+import type { FoldedEntry } from '@rimeward/field-log';
 import type { VisitFacts } from '../../facts/facts';
 import { ownRecord, type Rule } from '../../finding/rule';
 
 /** Each entry with the one that the same phone wrote before it on this visit. */
-function* steps({ state }: VisitFacts): Generator<{ before: LogEntry; entry: LogEntry }> {
-  const last = new Map<string, LogEntry>();
-  for (const { entry } of state.entries) {
-    const before = last.get(entry.device);
-    if (before) yield { before, entry };
-    last.set(entry.device, entry);
+function* steps({ state }: VisitFacts): Generator<{ before: FoldedEntry; after: FoldedEntry }> {
+  const last = new Map<string, FoldedEntry>();
+  for (const after of state.entries) {
+    const before = last.get(after.entry.device);
+    if (before) yield { before, after };
+    last.set(after.entry.device, after);
   }
 }
 
@@ -21,14 +21,15 @@ export const clockSetBack: Rule<'clock-set-back'> = {
   basis: ownRecord,
   find(facts, report) {
     const backs = new Map<string, { entryIds: string[]; worstMs: number; times: number }>();
-    for (const { before, entry } of steps(facts)) {
-      const backMs = estimatedMs(before) - estimatedMs(entry);
+    for (const { before, after } of steps(facts)) {
+      const backMs = before.claimedMs - after.claimedMs;
       if (backMs <= facts.thresholds.clockMinutes * 60_000) continue;
-      const known = backs.get(entry.device) ?? { entryIds: [], worstMs: 0, times: 0 };
-      known.entryIds.push(before.id, entry.id);
+      const { device } = after.entry;
+      const known = backs.get(device) ?? { entryIds: [], worstMs: 0, times: 0 };
+      known.entryIds.push(before.entry.id, after.entry.id);
       known.worstMs = Math.max(known.worstMs, backMs);
       known.times += 1;
-      backs.set(entry.device, known);
+      backs.set(device, known);
     }
     for (const [device, { entryIds, worstMs, times }] of backs) {
       report([...new Set(entryIds)], { device, minutes: minutes(worstMs), times });
@@ -42,12 +43,13 @@ export const clockChanged: Rule<'clock-changed'> = {
   severity: 'note',
   basis: ownRecord,
   find(facts, report) {
-    for (const { before, entry } of steps(facts)) {
-      const { offsetMs } = entry.time;
-      if (offsetMs === null || before.time.offsetMs === null) continue;
-      const jumpMs = Math.abs(offsetMs - before.time.offsetMs);
+    for (const { before, after } of steps(facts)) {
+      const offsetBeforeMs = before.entry.time.offsetMs;
+      const { offsetMs } = after.entry.time;
+      if (offsetMs === null || offsetBeforeMs === null) continue;
+      const jumpMs = Math.abs(offsetMs - offsetBeforeMs);
       if (jumpMs <= facts.thresholds.clockMinutes * 60_000) continue;
-      report([before.id, entry.id], { device: entry.device, minutes: minutes(jumpMs) });
+      report([before.entry.id, after.entry.id], { device: after.entry.device, minutes: minutes(jumpMs) });
     }
   },
 };
@@ -59,8 +61,8 @@ export const clockImplausible: Rule<'clock-implausible'> = {
   basis: ownRecord,
   find({ state, thresholds }, report) {
     const early = new Map<string, string[]>();
-    for (const { entry } of state.entries) {
-      if (estimatedMs(entry) >= thresholds.earliestMs) continue;
+    for (const { entry, claimedMs } of state.entries) {
+      if (claimedMs >= thresholds.earliestMs) continue;
       const entryIds = early.get(entry.device);
       if (entryIds) entryIds.push(entry.id);
       else early.set(entry.device, [entry.id]);
