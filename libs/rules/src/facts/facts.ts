@@ -10,6 +10,7 @@ import type {
 import type { RuleContext, RulePlan, RulesInput, RuleSettings } from '../input';
 import { thresholdsOf, type Thresholds } from '../thresholds';
 import { plainCeiling, type ZoneCeiling } from './ceilings';
+import { surelyBefore } from './surely-before';
 
 /** A zone of the record, or one that only the log knows. */
 export interface ZoneFacts {
@@ -36,6 +37,8 @@ export interface VisitFacts {
   /** Place of an entry in the log; a later entry has a higher one. */
   placeOf: (entryId: string) => number;
   first: (type: EntryType) => FoldedEntry | null;
+  /** Whether one entry came before another beyond the doubt of their clocks. */
+  surelyBefore: (one: FoldedEntry, other: FoldedEntry) => boolean;
   /** The entry with which the first air went on; null when there was none. */
   firstAir: FoldedEntry | null;
   /** In the order of their numbers, zones that only the log knows last. */
@@ -62,6 +65,7 @@ export function factsOf(input: RulesInput): VisitFacts {
   const zones = zonesOf(input);
   const byId = new Map(zones.map((zone) => [zone.id, zone]));
   const method = state.arrived?.removalMethod ?? system.removalMethod;
+  const thresholds = thresholdsOf(settings.thresholds);
   const leftDone = state.left?.outcome === 'done';
   return {
     state,
@@ -69,10 +73,11 @@ export function factsOf(input: RulesInput): VisitFacts {
     settings,
     context: input.context ?? {},
     plan: input.plan ?? null,
-    thresholds: thresholdsOf(settings.thresholds),
+    thresholds,
     standing,
     placeOf,
     first: (type) => firsts.get(type) ?? null,
+    surelyBefore: (one, other) => surelyBefore(one, other, thresholds.clockMinutes),
     firstAir: firsts.get('air-started') ?? null,
     zones,
     zoneOf: (zoneId) => byId.get(zoneId) ?? zoneFacts(input, null, zoneId),

@@ -10,7 +10,7 @@ function airBefore(
   const { firstAir } = facts;
   if (firstAir?.entry.type !== 'air-started') return null;
   const first = facts.first(type);
-  if (first && facts.placeOf(first.entry.id) < facts.placeOf(firstAir.entry.id)) return null;
+  if (first && !facts.surelyBefore(firstAir, first)) return null;
   const zone = facts.zoneOf(firstAir.entry.body.zoneId);
   return first
     ? { how: 'late', zone, entryIds: [firstAir.entry.id, first.entry.id] }

@@ -1,7 +1,8 @@
 import { testId } from '@rimeward/field-log/testing';
-import { line } from '@rimeward/field-log/testing/clean-visit';
+import type { LogEntry } from '@rimeward/field-log';
+import { line, written } from '@rimeward/field-log/testing/clean-visit';
 import { testParts, testPump, testSystem } from '@rimeward/field-log/testing/systems';
-import { before, changed, clean, judge, late, without } from '../../testing/judge';
+import { before, changed, clean, judge, judgeLog, late, without } from '../../testing/judge';
 import { checkRule } from '../../testing/check-rule';
 
 const first = { zoneNumber: 1, zoneName: 'Zone 1' };
@@ -12,6 +13,10 @@ const openValve = line('valve-set', {
   position: 'open',
   workedThrough: false,
 });
+const log = written(clean);
+const stopAt = clean.findIndex((one) => one.type === 'air-stopped');
+const minuteOfFirstStop = clean.slice(0, stopAt + 1).reduce((sum, one) => sum + one.wait, 0);
+const unmeasured = (one: LogEntry): LogEntry => ({ ...one, time: { ...one.time, offsetMs: null } });
 const sensor = { partId: testParts.sensor, kind: 'flow-sensor' } as const;
 
 checkRule('air-before-water-off', {
@@ -22,6 +27,11 @@ checkRule('air-before-water-off', {
   leaves: {
     'water off in time, and said again after the air': () =>
       judge(before('left', [line('water-off', { kind: 'was-closed' })])),
+    'water off by the helper, whose clock is two minutes ahead of nobody knows what': () => {
+      const off = line('water-off', { kind: 'shutoff-closed' });
+      const helper = written([off], { device: testId(2), firstMinute: minuteOfFirstStop });
+      return judgeLog([...written(without({ type: 'water-off' })), ...helper].map(unmeasured));
+    },
     'no air at all': () => judge(without(({ type }) => type === 'water-off' || type === 'air-started')),
   },
   params: { how: 'never', ...first },
@@ -137,6 +147,11 @@ checkRule('air-with-backflow-open', {
 
 checkRule('no-zone-open', {
   finds: {
+    'closed by the helper under air, clocks measured': () => {
+      const closing = line('zone-closed', { zoneId }, { wait: 0 });
+      const helper = written([closing], { device: testId(2), firstMinute: minuteOfFirstStop - 0.5 });
+      return judgeLog([...log, ...helper]);
+    },
     'the only zone closed under air': () => judge(before('air-stopped', [line('zone-closed', { zoneId })])),
   },
   leaves: {
@@ -144,6 +159,11 @@ checkRule('no-zone-open', {
       judge(
         before('air-stopped', [line('zone-opened', { zoneId: testId(12) }), line('zone-closed', { zoneId })]),
       ),
+    'closed by the helper, whose clock is some minutes behind': () => {
+      const closing = line('zone-closed', { zoneId }, { wait: 0 });
+      const helper = written([closing], { device: testId(2), firstMinute: minuteOfFirstStop - 0.5 });
+      return judgeLog([...log, ...helper].map(unmeasured));
+    },
     'closed after the air was off': () => {
       const at = clean.findIndex((one) => one.type === 'air-stopped') + 1;
       return judge([...clean.slice(0, at), line('zone-closed', { zoneId }), ...clean.slice(at)]);

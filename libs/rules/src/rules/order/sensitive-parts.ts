@@ -22,12 +22,13 @@ export const airBeforeSensitivePart: Rule<'air-before-sensitive-part'> = {
   severity: 'fault',
   basis: commonPractice,
   find(facts, report) {
-    const { firstAir, placeOf } = facts;
+    const { firstAir } = facts;
     if (!firstAir) return;
     for (const { kind, part } of partsOf(facts)) {
       if (!part || !isSafe(part)) continue;
       const safeSince = part.protection?.entryId ?? part.entryId;
-      if (placeOf(safeSince) > placeOf(firstAir.entry.id)) {
+      const said = facts.standing[facts.placeOf(safeSince)];
+      if (said && facts.surelyBefore(firstAir, said)) {
         report([firstAir.entry.id, safeSince], { part: kind });
       }
     }

@@ -20,10 +20,10 @@ export const cautionsNotRead: Rule<'cautions-not-read'> = {
   id: 'cautions-not-read',
   severity: 'fault',
   basis: commonPractice,
-  find({ first, firstAir, placeOf }, report) {
+  find({ first, firstAir, surelyBefore }, report) {
     if (!firstAir) return;
     const read = first('cautions-read');
-    if (!read || placeOf(read.entry.id) > placeOf(firstAir.entry.id)) {
+    if (!read || surelyBefore(firstAir, read)) {
       report([firstAir.entry.id, read?.entry.id], {});
     }
   },
@@ -34,13 +34,13 @@ export const peopleNotClear: Rule<'people-not-clear'> = {
   id: 'people-not-clear',
   severity: 'danger',
   basis: directedAir,
-  find({ standing, firstAir, placeOf }, report) {
+  find({ standing, firstAir, surelyBefore }, report) {
     if (!firstAir) return;
     const clear = standing.find(
       ({ entry }) => entry.type === 'people-clear' && entry.body.areaClear && entry.body.eyesAndEars,
     );
     if (!clear) report([firstAir.entry.id], { how: 'never' });
-    else if (placeOf(clear.entry.id) > placeOf(firstAir.entry.id)) {
+    else if (surelyBefore(firstAir, clear)) {
       report([firstAir.entry.id, clear.entry.id], { how: 'late' });
     }
   },

@@ -6,10 +6,10 @@ export const regulatorNotRecorded: Rule<'regulator-not-recorded'> = {
   id: 'regulator-not-recorded',
   severity: 'gap',
   basis: commonPractice,
-  find({ first, firstAir, placeOf }, report) {
+  find({ first, firstAir, surelyBefore }, report) {
     if (!firstAir) return;
     const set = first('regulator-set');
-    if (!set || placeOf(set.entry.id) > placeOf(firstAir.entry.id)) report([firstAir.entry.id], {});
+    if (!set || surelyBefore(firstAir, set)) report([firstAir.entry.id], {});
   },
 };
 
