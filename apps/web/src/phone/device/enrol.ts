@@ -5,6 +5,7 @@ import { databaseFault, type DatabaseFault } from '../database/faults';
 import type { Enrolment } from '../database/schema';
 import { jsonBody, type Fetcher } from '../session/api-fetch';
 import { rawFetch } from '../session/raw-fetch';
+import { forgetHead } from '../save/known-head';
 import { activeEnrolment, ownerOf, setActive } from './enrolment';
 import { renewLease } from './lease';
 import { dropReadData } from './sign-out';
@@ -35,6 +36,7 @@ async function enter(db: PhoneDatabase, session: Session, fetcher: Fetcher): Pro
   const device = known ?? (await enrol(session, fetcher));
   if (typeof device === 'string') return { ok: false, fault: device };
   const enrolment = { ...device, owner, user: session.user, company: session.company };
+  forgetHead();
   await db.transaction('rw', db.devices, db.meta, async () => {
     await db.devices.put(enrolment);
     await setActive(db, enrolment);

@@ -1,5 +1,6 @@
 import { database, type PhoneDatabase } from '../database/database';
 import { chainMarks } from '../delivery/chain-marks';
+import { forgetHead } from '../save/known-head';
 import { activeEnrolment, activeKey } from './enrolment';
 
 export interface UnsentWork {
@@ -36,6 +37,7 @@ export async function unsentWork(db: PhoneDatabase = database()): Promise<Unsent
  */
 export async function lockOnSignOut(db: PhoneDatabase = database()): Promise<void> {
   const enrolment = await activeEnrolment(db);
+  forgetHead();
   await db.meta.delete(activeKey);
   await dropReadData(db);
   if (enrolment === null) return;

@@ -17,6 +17,15 @@ export type NewEntry = {
   };
 }[EntryType];
 
+let zone = { name: '', hour: -1 };
+
+/** The phone's time zone, asked anew once an hour: the browser takes its time to tell, and a journey takes longer. */
+function timeZoneAt(wallMs: number): string {
+  const hour = Math.floor(wallMs / 3_600_000);
+  if (zone.hour !== hour) zone = { name: Intl.DateTimeFormat().resolvedOptions().timeZone ?? 'UTC', hour };
+  return zone.name;
+}
+
 export type UnsealedEntry = Omit<Envelope, 'seq' | 'prev'>;
 
 /** Everything of the envelope but the place in the chain. The clock is written down as told, with its known offset. */
@@ -40,7 +49,7 @@ export function entryDraft(
     photos: entry.photos ?? [],
     time: {
       wall: new Date(wallMs).toISOString(),
-      zone: Intl.DateTimeFormat().resolvedOptions().timeZone ?? 'UTC',
+      zone: timeZoneAt(wallMs),
       offsetMs: clock.offsetMs,
       // A clock set back since the estimate makes its age unknown.
       offsetAgeMs: age !== null && age >= 0 ? age : null,

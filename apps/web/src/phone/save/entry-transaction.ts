@@ -1,121 +1,87 @@
-import { sealEntry } from '@rimeward/delivery';
-import type { LogEntry } from '@rimeward/field-log';
 import { clockKey, clockOf } from '../clock/known-time';
-import { codec } from '../codec';
 import type { ActiveRow, EntryRow, MetaRow, PhotoRow } from '../database/schema';
 import { chainStart, markOf } from '../delivery/chain-marks';
 import { activeKey, ownerOf } from '../device/enrolment';
-import { entryDraft, type NewEntry } from './entry-draft';
-
-/** Longest text that the office takes as one entry, UTF-16 units. */
-const longestText = 64 * 1024;
-
-export type Refusal = 'not-enrolled' | 'other-person' | 'photo-missing' | 'too-large';
+import type { NewEntry } from './entry-draft';
+import { entryRow } from './entry-row';
+import { rememberHead, takeKnownHead, type KnownHead } from './known-head';
+import { SaveRefused } from './save-refused';
+import { strictTransaction } from './strict-transaction';
 
 export interface Written {
   row: EntryRow;
   photos: PhotoRow[];
 }
 
-/** Thrown inside the transaction so that nothing of it stays. */
-export class SaveRefused extends Error {
-  constructor(readonly fault: Refusal) {
-    super(fault);
-  }
+/**
+ * Writes an entry at the end of the chain and settles when the browser has committed. On top of a known head this is one
+ * request: the key (device, number) can be taken only once, so a tab that was overtaken is refused, and reads. Reading,
+ * the sealing happens inside the transaction. Either way no two tabs can take one number.
+ */
+export async function writeEntry(idb: IDBDatabase, entry: NewEntry, wallMs: number): Promise<Written> {
+  const guess = takeKnownHead(ownerOf(entry.company, entry.actor), wallMs);
+  const direct =
+    guess !== null && (entry.photos ?? []).length === 0 ? await onTopOf(idb, entry, wallMs, guess) : null;
+  return direct ?? readThenWrite(idb, entry, wallMs);
 }
 
-/** The device whose head was read last: a guess that lets everything be read in one go. */
-let guess = '';
-
-/**
- * One strict transaction, straight on IndexedDB: reads the head and who is active, seals, writes the entry and what it says
- * of its photographs, and commits without waiting for each answer. Sealing is synchronous and happens inside, so two tabs
- * can neither take one number nor have to try again. Settles when the browser has committed.
- */
-export function writeEntry(idb: IDBDatabase, entry: NewEntry, wallMs: number): Promise<Written> {
-  const shas = (entry.photos ?? []).map(({ sha256 }) => sha256);
-  const stores = ['meta', 'entries', ...(shas.length > 0 ? ['photos'] : [])];
-  return new Promise((resolve, reject) => {
-    const transaction = idb.transaction(stores, 'readwrite', { durability: 'strict' });
-    let written: Written | null = null;
-    let failure: unknown = null;
-    const guarded = (work: () => void) => (): void => {
-      try {
-        work();
-      } catch (error) {
-        failure = error;
-        transaction.abort();
-      }
-    };
-    transaction.oncomplete = () =>
-      written === null ? reject(new Error('nothing was written')) : resolve(written);
-    transaction.onabort = () =>
-      reject(failure ?? transaction.error ?? new DOMException('aborted', 'AbortError'));
-
-    const active = transaction.objectStore('meta').get(activeKey) as IDBRequest<ActiveRow | undefined>;
-    const clock = transaction.objectStore('meta').get(clockKey) as IDBRequest<MetaRow | undefined>;
-    const seal = (
-      device: string,
-      head: IDBRequest<IDBCursorWithValue | null>,
-      photos: IDBRequest<PhotoRow | undefined>[],
-    ) => {
-      const last = head.result?.value as EntryRow | undefined;
-      const row = nextEntry(entry, device, last, clockOf(clock.result), wallMs);
-      const named = photos.map(({ result }) => namedIn(result, entry.visit));
+/** Null when the number is taken. */
+async function onTopOf(
+  idb: IDBDatabase,
+  entry: NewEntry,
+  wallMs: number,
+  { owner, device, head, clock }: KnownHead,
+): Promise<Written | null> {
+  const row = entryRow(entry, device, head, clock, wallMs);
+  try {
+    await strictTransaction(idb, ['entries'], (transaction) => {
       transaction.objectStore('entries').add(row);
-      for (const photo of named) transaction.objectStore('photos').put(photo);
-      written = { row, photos: named };
       transaction.commit();
-    };
-    const read = (device: string) => ({
-      photos: shas.map(
-        (sha256) =>
-          transaction.objectStore('photos').get([device, sha256]) as IDBRequest<PhotoRow | undefined>,
-      ),
-      head: transaction
-        .objectStore('entries')
-        .openCursor(IDBKeyRange.bound([device, 0], [device, Infinity]), 'prev'),
     });
-    const early = read(guess);
-    early.head.onsuccess = guarded(() => {
+  } catch (error) {
+    if (error instanceof DOMException && error.name === 'ConstraintError') return null;
+    throw error;
+  }
+  rememberHead({ owner, device, head: markOf(row), clock }, wallMs);
+  return { row, photos: [] };
+}
+
+async function readThenWrite(idb: IDBDatabase, entry: NewEntry, wallMs: number): Promise<Written> {
+  const shas = (entry.photos ?? []).map(({ sha256 }) => sha256);
+  const done: { written?: Written; known?: KnownHead } = {};
+  await strictTransaction(idb, ['meta', 'entries', 'photos'], (transaction, guard) => {
+    const meta = transaction.objectStore('meta');
+    const entries = transaction.objectStore('entries');
+    const photos = transaction.objectStore('photos');
+    const active = meta.get(activeKey) as IDBRequest<ActiveRow | undefined>;
+    const clock = meta.get(clockKey) as IDBRequest<MetaRow | undefined>;
+    clock.onsuccess = guard(() => {
       const device = permitted(active.result, entry);
-      if (device === guess) return seal(device, early.head, early.photos);
-      const late = read(device);
-      late.head.onsuccess = guarded(() => {
-        seal(device, late.head, late.photos);
-        guess = device;
+      const found = shas.map((sha256) => photos.get([device, sha256]) as IDBRequest<PhotoRow | undefined>);
+      const newest = entries.openCursor(IDBKeyRange.bound([device, 0], [device, Infinity]), 'prev');
+      newest.onsuccess = guard(() => {
+        const last = newest.result?.value as EntryRow | undefined;
+        const knowledge = clockOf(clock.result);
+        const head = last === undefined ? chainStart : markOf(last);
+        const row = entryRow(entry, device, head, knowledge, wallMs);
+        const named = found.map(({ result }) => namedIn(result, entry.visit));
+        entries.add(row);
+        for (const photo of named) photos.put(photo);
+        transaction.commit();
+        done.written = { row, photos: named };
+        done.known = { owner: row.owner, device, head: markOf(row), clock: knowledge };
       });
     });
   });
+  if (done.written === undefined || done.known === undefined) throw new Error('committed without an entry');
+  rememberHead(done.known, wallMs);
+  return done.written;
 }
 
 function permitted(active: ActiveRow | undefined, entry: NewEntry): string {
   if (active === undefined) throw new SaveRefused('not-enrolled');
   if (active.owner !== ownerOf(entry.company, entry.actor)) throw new SaveRefused('other-person');
   return active.value;
-}
-
-function nextEntry(
-  entry: NewEntry,
-  device: string,
-  last: EntryRow | undefined,
-  clock: ReturnType<typeof clockOf>,
-  wallMs: number,
-): EntryRow {
-  const head = last === undefined ? chainStart : markOf(last);
-  const sealed = sealEntry(entryDraft(entry, device, clock, wallMs), head, codec);
-  if (sealed.text.length > longestText) throw new SaveRefused('too-large');
-  const parsed = JSON.parse(sealed.text) as LogEntry;
-  return {
-    ...sealed,
-    device,
-    id: parsed.id,
-    owner: ownerOf(entry.company, entry.actor),
-    visit: entry.visit,
-    bytesThrough: head.bytesThrough + sealed.byteLength,
-    entry: parsed,
-    savedMs: wallMs,
-  };
 }
 
 function namedIn(photo: PhotoRow | undefined, visit: string): PhotoRow {

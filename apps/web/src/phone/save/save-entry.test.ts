@@ -58,12 +58,15 @@ describe('saveEntry', () => {
   it('asks the browser for strict durability', async () => {
     const transaction = vi.spyOn(IDBDatabase.prototype, 'transaction');
     await enrolTechnician(1);
-    await saveEntry(noteOf(1, 'one'));
+    await saveEntry(noteOf(1, 'reads the head first'));
+    await saveEntry(noteOf(1, 'knows it'));
     const writing = transaction.mock.calls.filter(
       ([tables, mode]) => mode === 'readwrite' && [...(tables as string[])].includes('entries'),
     );
-    expect(writing.length).toBe(1);
-    expect(writing[0]?.[2]).toEqual({ durability: 'strict' });
+    expect(writing.map(([, , options]) => options)).toEqual([
+      { durability: 'strict' },
+      { durability: 'strict' },
+    ]);
   });
 
   it('gives 200 entries of two tabs 200 numbers without a gap', async () => {

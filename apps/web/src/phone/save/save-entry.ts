@@ -6,7 +6,8 @@ import { wakeDelivery } from '../delivery/wake';
 import { afterSave } from './after-save';
 import { dropBallast } from './ballast';
 import type { NewEntry } from './entry-draft';
-import { SaveRefused, writeEntry, type Refusal } from './entry-transaction';
+import { writeEntry, type Written } from './entry-transaction';
+import { SaveRefused, type Refusal } from './save-refused';
 import { tellLiveQueries } from './tell-live-queries';
 
 export type { NewEntry } from './entry-draft';
@@ -25,11 +26,16 @@ export async function saveEntry(entry: NewEntry): Promise<SaveResult> {
   if (!result.ok && result.fault === 'storage-full' && (await freeRoom())) result = await attempt(entry);
   if (!result.ok && result.fault === 'database-broken' && (await openPhone()).ok)
     result = await attempt(entry);
-  if (result.ok) {
+  return result;
+}
+
+/** What follows a save and must not delay it. */
+function afterwards(written: Written): void {
+  setTimeout(() => {
+    tellLiveQueries(database(), written);
     wakeDelivery();
     afterSave();
-  }
-  return result;
+  }, 0);
 }
 
 async function attempt(entry: NewEntry): Promise<SaveResult> {
@@ -37,7 +43,7 @@ async function attempt(entry: NewEntry): Promise<SaveResult> {
     const db = database();
     if (!db.isOpen()) await db.open();
     const written = await writeEntry(db.backendDB(), entry, Date.now());
-    tellLiveQueries(db, written);
+    afterwards(written);
     return { ok: true, entry: written.row.entry };
   } catch (error) {
     if (error instanceof SaveRefused) return { ok: false, fault: error.fault };

@@ -1,6 +1,7 @@
 import type { Session } from '@rimeward/contracts';
 import { database } from '../database/database';
 import type { Enrolment } from '../database/schema';
+import { forgetHead } from '../save/known-head';
 import { ownerOf, setActive } from '../device/enrolment';
 
 export const companyId = '018f6b2a-0000-7000-8000-00000000c001';
@@ -50,6 +51,7 @@ export async function enrolTechnician(n: number, device: Partial<Enrolment> = {}
     ...device,
   };
   await database().devices.put(enrolment);
+  forgetHead();
   await setActive(database(), enrolment);
   return enrolment;
 }
