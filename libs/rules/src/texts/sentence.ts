@@ -1,5 +1,4 @@
 import type { StoredFinding } from '../finding/finding';
-import { rulesById } from '../registry';
 import { en } from './en';
 import { es } from './es';
 import { sayIn, type Reader, type Say } from './say';
@@ -23,7 +22,7 @@ const usReader: Reader = { units: 'us', metricPressure: 'kPa' };
  */
 export function sentence(finding: StoredFinding, language: RulesLanguage, reader: Reader = usReader): string {
   const { ruleId, params } = finding;
-  if (!Object.hasOwn(rulesById, ruleId)) return unknownRule[language](ruleId);
+  if (!Object.hasOwn(en, ruleId)) return unknownRule[language](ruleId);
   // The params were made by the rule of this id; its text takes what that rule gives.
   const text = texts[language][ruleId as keyof RuleTexts] as (params: unknown, say: Say) => string;
   return text(params, sayIn(words[language], reader));
