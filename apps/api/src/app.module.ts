@@ -3,6 +3,7 @@ import { APP_FILTER } from '@nestjs/core';
 import { LoggerModule } from 'nestjs-pino';
 import { AuthModule } from './auth/auth.module';
 import { ProblemFilter } from './common/problem.filter';
+import { RequestLimitModule } from './common/request-limit.module';
 import { CompaniesModule } from './companies/companies.module';
 import { ENVIRONMENT, EnvironmentModule } from './config/config.module';
 import type { Environment } from './config/environment';
@@ -12,6 +13,7 @@ import { PhotosModule } from './photos/photos.module';
 import { ProjectionModule } from './projection/projection.module';
 import { ReviewModule } from './review/review.module';
 import { SigningModule } from './signing/signing.module';
+import { SitesModule } from './sites/sites.module';
 import { SyncModule } from './sync/sync.module';
 import { UsersModule } from './users/users.module';
 import { VisitsModule } from './visits/visits.module';
@@ -31,9 +33,11 @@ import { VisitsModule } from './visits/visits.module';
     }),
     DatabaseModule,
     SigningModule,
+    RequestLimitModule,
     AuthModule,
     CompaniesModule,
     UsersModule,
+    SitesModule,
     VisitsModule,
     SyncModule,
     PhotosModule,

@@ -5,6 +5,7 @@ export * from './problem/problem-codes';
 export * from './problem/problem-details';
 export * from './review/decision';
 export * from './review/queue';
+export * from './sites/sites';
 export * from './sync/pull';
 export * from './sync/push';
 export * from './visits/visit-document';

@@ -12,7 +12,13 @@ import { Session } from './entities/session.entity';
 import type { Principal } from './principal';
 import { isAlive } from './sessions.service';
 
-const claimsSchema = z.object({ sub: z.uuid(), company: z.uuid(), sid: z.uuid(), gen: z.number().int() });
+const claimsSchema = z.object({
+  sub: z.uuid(),
+  company: z.uuid(),
+  sid: z.uuid(),
+  gen: z.number().int(),
+  exp: z.number(),
+});
 
 /** Reads the access cookie, then asks the database whether that session still stands and who its person is today. */
 @Injectable()
@@ -32,7 +38,7 @@ export class AccessStrategy extends PassportStrategy(Strategy, 'access') {
   async validate(payload: unknown): Promise<Principal | false> {
     const claims = claimsSchema.safeParse(payload);
     if (!claims.success) return false;
-    const { sub, company, sid, gen } = claims.data;
+    const { sub, company, sid, gen, exp } = claims.data;
     return this.context.run(company, async (manager) => {
       const session = await manager.findOneBy(Session, { companyId: company, id: sid });
       const user = await manager.findOneBy(User, { companyId: company, id: sub });
@@ -41,7 +47,14 @@ export class AccessStrategy extends PassportStrategy(Strategy, 'access') {
       if (gen === session.generation && !session.generationUsed) {
         await manager.update(Session, { companyId: company, id: sid }, { generationUsed: true });
       }
-      return { companyId: company, userId: user.id, name: user.name, role: user.role, sessionId: sid };
+      return {
+        companyId: company,
+        userId: user.id,
+        name: user.name,
+        role: user.role,
+        sessionId: sid,
+        accessExpiresAt: new Date(exp * 1_000),
+      };
     });
   }
 }

@@ -38,14 +38,14 @@ export class AuthService {
     const knownBrowser = enabled.some(
       (user) => from.known === knownBrowserMark(this.environment.SESSION_JWT_SECRET, user.id),
     );
-    const wait = this.attempts.waitSeconds(email, from.address, knownBrowser);
+    const attempt = { account: email, address: from.address, knownBrowser };
+    const wait = this.attempts.begin(attempt);
     if (wait > 0) throw new ProblemException('too-many-attempts', { retryAfterSeconds: wait });
     for (const user of enabled.length > 0 ? enabled : [null]) {
       if (!(await this.passwords.matches(user?.passwordHash ?? null, request.password)) || !user) continue;
-      this.attempts.succeeded(email);
+      this.attempts.succeeded(attempt);
       return this.sessions.open(user);
     }
-    this.attempts.failed(email, from.address);
     this.logger.warn('A sign-in failed');
     throw new ProblemException('sign-in-failed');
   }

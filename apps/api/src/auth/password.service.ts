@@ -17,27 +17,39 @@ export class PasswordService {
   private readonly nobody = hash('nobody has this password', parameters);
 
   hash(password: string): Promise<string> {
-    return this.inLane(() => hash(password, parameters));
+    return this.inLane(() => hash(exact(password), parameters));
   }
 
   async matches(passwordHash: string | null, password: string): Promise<boolean> {
     const known = passwordHash ?? (await this.nobody);
-    const right = await this.inLane(() => verify(known, password));
+    const right = await this.inLane(() => verify(known, exact(password)));
     return right && passwordHash !== null;
   }
 
   private async inLane<T>(work: () => Promise<T>): Promise<T> {
-    if (this.busy >= lanes) {
-      if (this.waiting.length >= longestQueue)
-        throw new ProblemException('too-many-requests', { retryAfterSeconds: 2 });
-      await new Promise<void>((resolve) => this.waiting.push(resolve));
-    }
-    this.busy += 1;
+    await this.enterLane();
     try {
       return await work();
     } finally {
-      this.busy -= 1;
-      this.waiting.shift()?.();
+      const next = this.waiting.shift();
+      // The lane goes over to whoever waits; it is never free for somebody else in between.
+      if (next) next();
+      else this.busy -= 1;
     }
   }
+
+  private async enterLane(): Promise<void> {
+    if (this.busy < lanes) {
+      this.busy += 1;
+      return;
+    }
+    if (this.waiting.length >= longestQueue)
+      throw new ProblemException('too-many-requests', { retryAfterSeconds: 2 });
+    await new Promise<void>((resolve) => this.waiting.push(resolve));
+  }
+}
+
+/** One spelling for letters that keyboards write in two ways (NFC, as NIST SP 800-63B asks for). */
+function exact(password: string): string {
+  return password.normalize('NFC');
 }

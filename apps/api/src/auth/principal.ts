@@ -7,4 +7,5 @@ export interface Principal {
   name: string;
   role: Role;
   sessionId: string;
+  accessExpiresAt: Date;
 }

@@ -1,4 +1,4 @@
-import { Inject, Injectable } from '@nestjs/common';
+import { Inject, Injectable, Logger } from '@nestjs/common';
 import { JwtService } from '@nestjs/jwt';
 import type { Role } from '@rimeward/contracts';
 import { randomUUID } from 'node:crypto';
@@ -36,6 +36,8 @@ function limitsOf(role: Role): { idleMs: number; absoluteMs: number } {
 /** Opens, renews and ends sessions. The record in the database is the truth; tokens only point at it. */
 @Injectable()
 export class SessionsService {
+  private readonly logger = new Logger('Sessions');
+
   constructor(
     private readonly context: CompanyContext,
     private readonly jwt: JwtService,
@@ -65,14 +67,13 @@ export class SessionsService {
 
   /**
    * The successor of a renewal token. The token before it stays good until the successor has been used, so a lost answer
-   * signs nobody out; a token that comes back after that was copied, and ends the session.
+   * signs nobody out; a token that comes back after that was copied, and ends the session. Tabs that renew at once within a
+   * minute get the same successor.
    */
   async renew(token: string): Promise<OpenSession> {
     const claim = readRenewalToken(this.environment.SESSION_JWT_SECRET, token);
     if (!claim) throw new ProblemException('not-signed-in');
-    const found = await this.context.lookUp({ by: 'session', value: claim.sessionId }, (manager) =>
-      manager.findOneBy(Session, { id: claim.sessionId }),
-    );
+    const found = await this.sessionOf(token);
     if (!found) throw new ProblemException('session-ended');
     const renewed = await this.context.run(found.companyId, (manager) =>
       this.rotate(manager, found, claim.generation),
@@ -93,15 +94,21 @@ export class SessionsService {
     const user = await manager.findOneBy(User, { companyId: found.companyId, id: found.userId });
     const now = new Date();
     if (!user || user.disabledAt || !isAlive(session, now)) return null;
+    const justRotated = now.getTime() - session.rotatedAt.getTime() < raceMs;
     if (generation === session.generation) {
-      session.generation += 1;
-      session.generationUsed = false;
-      session.rotatedAt = now;
+      if (!justRotated) {
+        session.generation += 1;
+        session.generationUsed = false;
+        session.rotatedAt = now;
+      }
     } else {
       const again = generation === session.generation - 1;
-      const race = now.getTime() - session.rotatedAt.getTime() < raceMs;
-      if (!again || (session.generationUsed && !race)) {
+      if (!again || (session.generationUsed && !justRotated)) {
         await this.end(manager, session, 'token used twice');
+        this.logger.warn(
+          { sessionId: session.id, userId: user.id },
+          'A renewal token was used twice: the session is ended',
+        );
         return null;
       }
     }
@@ -111,16 +118,27 @@ export class SessionsService {
     return this.tokens(session, user);
   }
 
-  async endById(companyId: string, sessionId: string, because: string): Promise<void> {
-    await this.context.run(companyId, (manager) =>
-      manager.update(Session, { companyId, id: sessionId }, { endedAt: new Date(), endedBecause: because }),
+  /** Ends the session of a token of any generation; a token that names none changes nothing. */
+  async endByToken(token: string, because: string): Promise<void> {
+    const session = await this.sessionOf(token);
+    if (!session || session.endedAt) return;
+    await this.context.run(session.companyId, (manager) => this.end(manager, session, because));
+  }
+
+  private sessionOf(token: string): Promise<Session | null> {
+    const claim = readRenewalToken(this.environment.SESSION_JWT_SECRET, token);
+    if (!claim) return Promise.resolve(null);
+    return this.context.lookUp({ by: 'session', value: claim.sessionId }, (manager) =>
+      manager.findOneBy(Session, { id: claim.sessionId }),
     );
   }
 
   private async end(manager: EntityManager, session: Session, because: string): Promise<void> {
-    session.endedAt = new Date();
-    session.endedBecause = because;
-    await manager.save(session);
+    await manager.update(
+      Session,
+      { companyId: session.companyId, id: session.id },
+      { endedAt: new Date(), endedBecause: because },
+    );
   }
 
   private async tokens(session: Session, user: User): Promise<OpenSession> {

@@ -42,7 +42,7 @@ export class ProblemFilter implements ExceptionFilter {
     const status = statusOf(thrown);
     if (status !== null) return new ProblemException(codeOfStatus[status] ?? 'bad-request');
     this.logger.error(thrown instanceof Error ? (thrown.stack ?? thrown.message) : String(thrown));
-    return new ProblemException(isConnectionFault(thrown) ? 'unavailable' : 'internal');
+    return new ProblemException(codeOfFault(thrown));
   }
 }
 
@@ -52,9 +52,10 @@ function statusOf(thrown: unknown): number | null {
   return typeof status === 'number' && status >= 400 && status < 500 ? status : null;
 }
 
-function isConnectionFault(thrown: unknown): boolean {
+/** Codes of PostgreSQL (class 08, 53, 57P: no connection; 22: a value that it cannot hold) and of the network. */
+function codeOfFault(thrown: unknown): ProblemCode {
   const code = (thrown as { code?: unknown } | null)?.code;
-  return (
-    typeof code === 'string' && (/^(ECONN|EPIPE|ETIMEDOUT|ENOTFOUND)/.test(code) || /^(08|57P|53)/.test(code))
-  );
+  if (typeof code !== 'string') return 'internal';
+  if (/^(ECONN|EPIPE|ETIMEDOUT|ENOTFOUND)/.test(code) || /^(08|57P|53)/.test(code)) return 'unavailable';
+  return /^22[0-9A-Z]{3}$/.test(code) ? 'bad-request' : 'internal';
 }

@@ -31,12 +31,14 @@ export function securityHeaders(): RequestHandler[] {
     frameguard: { action: 'deny' },
     crossOriginEmbedderPolicy: false,
   });
-  const permissions: RequestHandler = (_request, response, next) => {
+  const ownHeaders: RequestHandler = (request, response, next) => {
+    // Answers of the API belong to one person; a route that may be kept says so itself.
+    if (request.path.startsWith('/api/')) response.setHeader('Cache-Control', 'no-store');
     response.setHeader(
       'Permissions-Policy',
       'camera=(self), geolocation=(self), microphone=(), payment=(), usb=()',
     );
     next();
   };
-  return [policy, permissions];
+  return [policy, ownHeaders];
 }

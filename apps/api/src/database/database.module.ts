@@ -4,6 +4,7 @@ import { ENVIRONMENT } from '../config/config.module';
 import type { Environment } from '../config/environment';
 import { CompanyContext } from './company-context';
 import { dataSourceOptions } from './data-source';
+import { DatabaseReadiness } from './readiness';
 
 @Global()
 @Module({
@@ -18,7 +19,7 @@ import { dataSourceOptions } from './data-source';
       }),
     }),
   ],
-  providers: [CompanyContext],
-  exports: [CompanyContext],
+  providers: [CompanyContext, DatabaseReadiness],
+  exports: [CompanyContext, DatabaseReadiness],
 })
 export class DatabaseModule {}
