@@ -62,17 +62,11 @@ export class ProjectionService implements OnModuleDestroy {
     }
   }
 
-  /** Makes every copy of a company anew from the log. */
-  async rebuild(companyId: string): Promise<void> {
-    await this.context.run(companyId, (manager) => markUnprojected(manager, true));
-    await this.catchUp(companyId);
-  }
-
   private async drain(companyId: string): Promise<void> {
     const failed = new Set<string>();
     for (;;) {
       const stale = await this.context.run(companyId, async (manager) => {
-        await markUnprojected(manager, false);
+        await markUnprojected(manager);
         return staleVisits(manager, visitsAtOnce + failed.size);
       });
       const visits = stale.filter((visitId) => !failed.has(visitId));

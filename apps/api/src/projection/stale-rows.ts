@@ -14,22 +14,17 @@ export async function staleVisits(manager: EntityManager, limit: number): Promis
   return rows.map((row) => row.visit_id);
 }
 
-/**
- * Marks every visit that has no copy yet, and those under way on which a night has passed, since what is missing counts from
- * then on; for a rebuild every visit.
- */
-export async function markUnprojected(manager: EntityManager, all: boolean): Promise<void> {
+/** Marks every visit that has no copy yet, and those under way on which a night has passed: what is missing counts from then on. */
+export async function markUnprojected(manager: EntityManager): Promise<void> {
   await manager.query(
     `insert into stale_projections (company_id, visit_id)
      select v.company_id, v.id from visits v
+     left join visit_projections p on p.company_id = v.company_id and p.visit_id = v.id
      where v.company_id = ${company}
-       and ($1
-         or not exists (select from visit_projections p where p.company_id = v.company_id and p.visit_id = v.id)
-         or exists (select from visit_projections p where p.company_id = v.company_id and p.visit_id = v.id
-           and p.standing = 'under-way' and not p.at_the_end and v.date < ((now() - interval '12 hours') at time zone 'UTC')::date))
+       and (p.visit_id is null or (p.standing = 'under-way' and not p.at_the_end
+         and v.date < ((now() - interval '12 hours') at time zone 'UTC')::date))
      order by v.id
-     on conflict (company_id, visit_id) do update set attempts = 0, mark = gen_random_uuid() where $1`,
-    [all],
+     on conflict (company_id, visit_id) do nothing`,
   );
 }
 

@@ -9,6 +9,7 @@ import {
 } from '@rimeward/contracts';
 import type { PhotoReference } from '@rimeward/field-log';
 import sharp from 'sharp';
+import { PhotoStorage, StorageFullError } from '../../src/photos/storage/photo-storage';
 import { crewOfOne, Office } from './office';
 import type { Answer, TestPhone } from './test-phone';
 
@@ -201,6 +202,18 @@ describe('bringing a photograph', () => {
     expect((await sharp(kept).metadata()).exif).toBeUndefined();
     const page = await phone.send<ProblemDetails>(`/photos/${hashOf(small)}/preview`, file('preview', small));
     expect(page.status).toBe(404);
+  });
+
+  it('says that the storage is full, loses nothing, and takes the part when there is room again', async () => {
+    const { phone } = await crewOfOne(office);
+    const storage = office.test.app.get(PhotoStorage, { strict: false });
+    await announce(phone, picture);
+    const [first] = parts(picture);
+    const full = jest.spyOn(storage, 'writePart').mockRejectedValueOnce(new StorageFullError('no room'));
+    expect(codeOf(await sendPart(phone, hashOf(picture), 0, first!))).toEqual([507, 'storage-full']);
+    full.mockRestore();
+    const again = await sendPart(phone, hashOf(picture), 0, first!);
+    expect(again.body.missingParts).not.toContain(0);
   });
 
   it('takes nothing with a forged credential', async () => {

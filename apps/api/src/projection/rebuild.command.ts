@@ -1,0 +1,4 @@
+import { runAsMigrator } from '../database/run-as-migrator';
+import { dropProjections } from './drop-projections';
+
+runAsMigrator(dropProjections);

@@ -1,0 +1,4 @@
+import { runAsMigrator } from '../../database/run-as-migrator';
+import { renewEpoch } from './renew-epoch';
+
+runAsMigrator(renewEpoch);
