@@ -1,7 +1,7 @@
-/** How a reader wants figures and names: units, and who a person is. */
-export interface Reader {
-  units: 'us' | 'metric';
-  metricPressure: 'kPa' | 'bar';
+import { mPerFt, paPerPsi, type UnitChoice } from '@rimeward/units';
+
+/** How a reader wants figures and names: the company's units, and who a person is. */
+export interface Reader extends UnitChoice {
   /** The name of a person by id; without it the sentence says "somebody". */
   nameOf?: (personId: string) => string | undefined;
 }
@@ -44,22 +44,18 @@ export interface Say {
   why: (why: string) => string;
 }
 
-/** Pascals in a psi: 4.4482216152605 N over (0.0254 m) squared, exact by definition (NIST SP 811). */
-const pascalsPerPsi = 6_894.757293168;
-const feetPerMetre = 1 / 0.3048;
-
 export function sayIn(words: Words, reader: Reader): Say {
   const figure = (value: number, digits: number): string =>
     value.toFixed(digits).replace(/\.0+$/, '').replace('.', words.decimal);
   const pressure = (psi: number): string => {
     if (reader.units === 'us') return `${figure(psi, 1)} psi`;
-    const pascals = psi * pascalsPerPsi;
+    const pascals = psi * paPerPsi;
     return reader.metricPressure === 'bar'
       ? `${figure(pascals / 1e5, 1)} bar`
       : `${figure(pascals / 1e3, 0)} kPa`;
   };
   const distance = (metres: number): string =>
-    reader.units === 'us' ? `${figure(metres * feetPerMetre, 0)} ft` : `${figure(metres, 0)} m`;
+    reader.units === 'us' ? `${figure(metres / mPerFt, 0)} ft` : `${figure(metres, 0)} m`;
   const from =
     (list: Readonly<Record<string, string>>) =>
     (word: string): string =>
