@@ -17,8 +17,8 @@ export function configureApp(app: NestExpressApplication): NestExpressApplicatio
   app.set('trust proxy', 'loopback');
   app.setGlobalPrefix('api');
   app.use(...securityHeaders());
-  if (environment.WEB_DIST_DIR) app.use(webFiles(environment.WEB_DIST_DIR));
   app.use(compression());
+  if (environment.WEB_DIST_DIR) app.use(webFiles(environment.WEB_DIST_DIR));
   app.use(cookieParser());
   app.useBodyParser('json', { limit: bodyLimit, inflate: true });
   app.enableShutdownHooks();

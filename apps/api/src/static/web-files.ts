@@ -1,5 +1,5 @@
 import type { RequestHandler, Response } from 'express';
-import { existsSync, readdirSync } from 'node:fs';
+import { existsSync, readdirSync, statSync } from 'node:fs';
 import { extname, join, relative, resolve, sep } from 'node:path';
 
 const types: Record<string, string> = {
@@ -51,7 +51,15 @@ function send(
     ([name, end]) => accepted.includes(name) && files.has(file + end),
   ) ?? ['', ''];
   if (encoding) response.setHeader('Content-Encoding', encoding);
-  response.sendFile(join(root, file + suffix), { cacheControl: false, dotfiles: 'deny' });
+  const path = join(root, file + suffix);
+  response.setHeader('ETag', tagOf(path));
+  response.sendFile(path, { cacheControl: false, dotfiles: 'deny' });
+}
+
+/** The framework's own tags are switched off, since the API's answers are nobody's to keep. */
+function tagOf(path: string): string {
+  const { size, mtimeMs } = statSync(path, { throwIfNoEntry: false }) ?? { size: 0, mtimeMs: 0 };
+  return `W/"${size.toString(16)}-${Math.round(mtimeMs).toString(16)}"`;
 }
 
 function pathOf(path: string): string | null {
