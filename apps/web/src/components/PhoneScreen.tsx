@@ -48,6 +48,7 @@ export function PhoneScreen({ title, subtitle, back, action, children }: Props) 
           sx={{
             position: 'sticky',
             bottom: 0,
+            zIndex: 10,
             bgcolor: 'background.default',
             p: 2,
             pb: 'max(16px, env(safe-area-inset-bottom))',

@@ -11,7 +11,7 @@ export async function storageStanding(): Promise<StorageStanding> {
   const manager = storageManager();
   if (manager === null) return { usedBytes: null, quotaBytes: null, persisted: null };
   const [estimate, persisted] = await Promise.all([
-    manager.estimate().catch(() => ({}) as StorageEstimate),
+    manager.estimate().catch((): StorageEstimate => ({})),
     manager.persisted().catch(() => null),
   ]);
   return { usedBytes: estimate.usage ?? null, quotaBytes: estimate.quota ?? null, persisted };

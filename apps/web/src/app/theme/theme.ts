@@ -52,7 +52,10 @@ export function themeOf(mode: DisplayMode): Theme {
       MuiButton: {
         defaultProps: { disableElevation: true },
         styleOverrides: {
-          root: { minHeight: 56 },
+          root: {
+            minHeight: 56,
+            '&.Mui-disabled': { color: colours.ink, borderStyle: 'dashed', borderColor: colours.line },
+          },
           outlined: { borderWidth: stroke, '&:hover': { borderWidth: stroke } },
         },
       },

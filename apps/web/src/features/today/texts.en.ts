@@ -22,6 +22,7 @@ const en = {
   earlier: 'The day before',
   later: 'The day after',
   today: 'Today',
+  settings: 'Settings',
   onThisPhone: 'On this phone',
   next: 'Next stop: {{site}}',
   dayDone: 'The day is done',

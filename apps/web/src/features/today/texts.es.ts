@@ -24,6 +24,7 @@ const es: TodayTexts = {
   earlier: 'El día anterior',
   later: 'El día siguiente',
   today: 'Hoy',
+  settings: 'Ajustes',
   onThisPhone: 'En este teléfono',
   next: 'Próxima parada: {{site}}',
   dayDone: 'El día está hecho',

@@ -29,6 +29,7 @@ const en = {
     loading: 'Reading the visit from this phone',
     notHere: 'This visit is not on this phone. Connect once to bring it here.',
     nextStep: 'Next: {{step}}',
+    stepDone: 'Done',
     allDone: 'All steps are recorded',
     everyStep: 'All steps',
     defectsAndNotes: 'Defects and notes',

@@ -31,6 +31,7 @@ const es: VisitTexts = {
     loading: 'Leyendo la visita de este teléfono',
     notHere: 'Esta visita no está en este teléfono. Conéctese una vez para traerla.',
     nextStep: 'Sigue: {{step}}',
+    stepDone: 'Hecho',
     allDone: 'Todos los pasos están anotados',
     everyStep: 'Todos los pasos',
     defectsAndNotes: 'Defectos y notas',

@@ -1,6 +1,6 @@
-import { photoFields } from '@rimeward/contracts';
 import type { HttpAnswer, PhotoToSend, Sent, Transport } from '@rimeward/delivery';
 import type { Enrolment } from '../database/schema';
+import { photoFields } from '../photos/limits';
 import type { Fetcher } from '../session/raw-fetch';
 import { renewSession } from '../session/renew';
 import { compressed } from './compress';

@@ -1,11 +1,12 @@
 import { Dexie } from 'dexie';
 import type { PhoneDatabase } from '../database/database';
+import { photoLimits } from './limits';
 
 /**
  * Size of a stored chunk, bytes: the same as one part of an upload. Chunks are ArrayBuffers, never Blobs: one engine
  * loses Blobs in IndexedDB at times.
  */
-export const chunkBytes = 256 * 1024;
+export const chunkBytes = photoLimits.partBytes;
 
 /** Writes the bytes in chunks and reads each one back; false when what came back is not what was written. */
 export async function storeChunks(db: PhoneDatabase, sha256: string, bytes: ArrayBuffer): Promise<boolean> {

@@ -1,4 +1,5 @@
 import { createHash, randomFillSync } from 'node:crypto';
+import { photoLimits as contractLimits } from '@rimeward/contracts';
 import { beforeEach, describe, expect, it } from 'vitest';
 import { database } from '../database/database';
 import { readDraft, writeDraft } from '../drafts';
@@ -6,6 +7,7 @@ import { tidy } from '../retention';
 import { saveEntry } from '../save/save-entry';
 import { freshDatabase } from '../testing/fresh-database';
 import { enrolTechnician, noteOf } from '../testing/people';
+import { photoLimits } from './limits';
 import { storePhoto } from './intake';
 import { readPhoto } from './read-photo';
 
@@ -29,6 +31,10 @@ beforeEach(async () => {
 });
 
 describe('storePhoto', () => {
+  it('goes by the limits of the contract', () => {
+    expect(photoLimits).toEqual(contractLimits);
+  });
+
   it.each(Object.entries(heads))('knows %s by its content and keeps it byte for byte', async (type, head) => {
     const file = picture(256 * 1024 * 2 + 17, head);
     const bytes = Buffer.from(await file.arrayBuffer());

@@ -1,4 +1,4 @@
-import { photoLimits, type PhotoType } from '@rimeward/contracts';
+import type { PhotoType } from '@rimeward/contracts';
 import { toHex } from '@rimeward/delivery';
 import type { GeoPoint, PhotoReference, PhotoRole } from '@rimeward/field-log';
 import { database, type PhoneDatabase } from '../database/database';
@@ -6,6 +6,7 @@ import { databaseFault, type DatabaseFault } from '../database/faults';
 import type { Enrolment, PhotoRow } from '../database/schema';
 import { activeEnrolment } from '../device/enrolment';
 import { storeChunks } from './chunks';
+import { photoLimits } from './limits';
 import { queuePreview } from './preview';
 import { sniffedBytes, sniffPhotoType } from './sniff';
 

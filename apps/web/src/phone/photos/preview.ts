@@ -1,7 +1,8 @@
-import { photoLimits, type PhotoType } from '@rimeward/contracts';
+import type { PhotoType } from '@rimeward/contracts';
 import { database } from '../database/database';
 import { databaseFault } from '../database/faults';
 import { wakeDelivery } from '../delivery/wake';
+import { photoLimits } from './limits';
 
 /** Longest side of a preview, px. */
 const longestSidePx = 1_600;

@@ -5,6 +5,7 @@ import { IDBDatabase, IDBObjectStore } from 'fake-indexeddb';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
 import { codec } from '../codec';
 import { database } from '../database/database';
+import type { EntryRow } from '../database/schema';
 import { unsentWork } from '../device/sign-out';
 import { storePhoto } from '../photos/intake';
 import { entriesOfVisit } from '../queries/entries';
@@ -78,7 +79,7 @@ describe('saveEntry', () => {
       (index % 2 === 0 ? saveEntry : otherTab.saveEntry)(noteOf(1, `note ${index}`));
     const results = await Promise.all(Array.from({ length: 200 }, (_, index) => save(index)));
     expect(results.every(({ ok }) => ok)).toBe(true);
-    const rows = await own.table('entries').toArray();
+    const rows = (await own.table('entries').toArray()) as EntryRow[];
     expect(rows.map(({ seq }) => seq)).toEqual(Array.from({ length: 200 }, (_, index) => index + 1));
     expect(verifyChain(deviceId, emptyChain, rows, codec).ok).toBe(true);
     (await import('../database/database')).closeDatabase();

@@ -11,12 +11,12 @@ export function strictTransaction(
 ): Promise<void> {
   return new Promise((resolve, reject) => {
     const transaction = idb.transaction(stores, 'readwrite', { durability: 'strict' });
-    let failure: unknown = null;
+    let failure: Error | null = null;
     const guard: Guard = (handler) => () => {
       try {
         handler();
       } catch (error) {
-        failure ??= error;
+        failure ??= error instanceof Error ? error : new Error(String(error));
         transaction.abort();
       }
     };

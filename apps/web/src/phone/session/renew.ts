@@ -19,7 +19,7 @@ export function renewSession(fetcher: Fetcher = fetch): Promise<Renewal> {
 
 function alone(work: () => Promise<Renewal>): Promise<Renewal> {
   if (typeof navigator === 'undefined' || navigator.locks === undefined) return work();
-  return navigator.locks.request('rimeward-renew', work) as Promise<Renewal>;
+  return navigator.locks.request('rimeward-renew', work);
 }
 
 async function renew(fetcher: Fetcher): Promise<Renewal> {

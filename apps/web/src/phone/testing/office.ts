@@ -20,11 +20,11 @@ export class Office {
   fault: (path: string, n: number) => 'lose-request' | 'lose-answer' | Response | null = () => null;
 
   get verifyKey(): Record<string, unknown> {
-    return this.keys.publicKey.export({ format: 'jwk' }) as Record<string, unknown>;
+    return { ...this.keys.publicKey.export({ format: 'jwk' }) };
   }
 
   readonly fetch: typeof fetch = async (input, init) => {
-    const request = new Request(new URL(String(input), 'https://office.test'), init);
+    const request = new Request(new URL(input as string, 'https://office.test'), init);
     const path = new URL(request.url).pathname + new URL(request.url).search;
     this.requests.push({
       path,

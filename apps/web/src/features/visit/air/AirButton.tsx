@@ -24,6 +24,7 @@ export function AirButton({ running, disabled, done, nextLabel, onStart, onStop,
       sx={{
         width: '100%',
         minHeight: '34dvh',
+        fontFamily: 'inherit',
         fontSize: 32,
         fontWeight: 700,
         gap: 2,

@@ -25,7 +25,7 @@ export function CloseDownStep({ onDone }: { onDone: () => void }) {
         next ? (
           <MainAction onClick={() => void record(next)}>{t(`closeDown.${next}`)}</MainAction>
         ) : (
-          <MainAction onClick={onDone}>{t('stepStatus.done')}</MainAction>
+          <MainAction onClick={onDone}>{t('visit.stepDone')}</MainAction>
         )
       }
     >

@@ -68,7 +68,7 @@ export function ValvesStep({ stage, onDone }: Props) {
             {t(stage === 'winter' ? 'valves.allHalfOpen' : 'valves.allClosed')}
           </MainAction>
         ) : (
-          <MainAction onClick={() => void finish()}>{t(`stepStatus.done`)}</MainAction>
+          <MainAction onClick={() => void finish()}>{t('visit.stepDone')}</MainAction>
         )
       }
     >

@@ -23,7 +23,7 @@ export function WinterStep({
   const insulated = state.insulated.map((said) => said.what);
 
   return (
-    <StepScreen step={step} action={<MainAction onClick={onDone}>{t('stepStatus.done')}</MainAction>}>
+    <StepScreen step={step} action={<MainAction onClick={onDone}>{t('visit.stepDone')}</MainAction>}>
       {system.drains.length === 0 && <Typography>{t('winter.noDrains')}</Typography>}
       {system.drains.map((drain) => (
         <DrainTiles key={drain.id} drain={drain} />
