@@ -21,7 +21,7 @@ import type { Result } from '@rimeward/units';
 const page = readFileSync(join(__dirname, '../../../docs/trips.md'), 'utf8');
 /** Last cell of each row of the page's tables, by the id in its first. */
 const figures = new Map(
-  [...page.matchAll(/^\| ([A-Z]\d+) \|.*\| ([^|]+) \|$/gm)].map((row) => [row[1] ?? '', row[2] ?? '']),
+  [...page.matchAll(/^\| ([A-Z]\d+)\s*\|.*\| ([^|]+?)\s*\|$/gm)].map((row) => [row[1] ?? '', row[2] ?? '']),
 );
 
 const have = <T>(result: Result<T>): T => {

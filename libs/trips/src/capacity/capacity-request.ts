@@ -5,8 +5,10 @@ export interface SeasonVisit {
   id: string;
   /** Minutes of work on site; null when nobody has said. */
   workMinutes: number | null;
-  /** Last day on which it still comes before the freeze, `none` when no freeze is expected, null when unknown. */
-  finishBy: LocalDate | 'none' | null;
+  /** Last day on which it still comes before the freeze; null when unknown. */
+  finishBy: LocalDate | null;
+  /** True where the normals give no freeze at the accepted risk: then it has no last day, and needs none. */
+  noFreezeExpected?: boolean;
   /** First day on which it can be done; any day when left out. */
   earliestDate?: LocalDate;
   /** Crews that can do it; every crew when left out. */

@@ -1,5 +1,6 @@
+import { type Failure, outOfRange, within } from '@rimeward/units';
 import { isLocalDate } from '../calendar/local-date';
-import { firstFailure, outOfRange, within, type Failure } from '../explain/outcome';
+import { firstFailure } from '../explain/first-failure';
 import type { CapacityRequest, SeasonCrew, SeasonVisit } from './capacity-request';
 
 const day = 'YYYY-MM-DD';
@@ -27,7 +28,7 @@ function eachOnce(field: string, ids: readonly string[]): Failure | undefined {
 }
 
 function checkVisit({ id, workMinutes, finishBy, earliestDate }: SeasonVisit): Failure | undefined {
-  const dated = finishBy === null || finishBy === 'none' || isLocalDate(finishBy);
+  const dated = finishBy === null || isLocalDate(finishBy);
   return firstFailure(
     workMinutes === null ? undefined : within(`visit ${id}: workMinutes`, workMinutes, 1, 10_080),
     dated ? undefined : outOfRange(`visit ${id}: finishBy`, day),

@@ -10,10 +10,14 @@ const crew = (id: string, days: number, minutes = 480): SeasonCrew => ({
   id,
   days: Array.from({ length: days }, (_, day) => ({ date: dayAfter(day), minutes })),
 });
-const visit = (id: string, workMinutes: number | null, finishBy: SeasonVisit['finishBy']): SeasonVisit => ({
+const visit = (id: string, workMinutes: number | null, finishBy: string | null): SeasonVisit => ({
   id,
   workMinutes,
   finishBy,
+});
+const mildSite = (id: string, workMinutes: number): SeasonVisit => ({
+  ...visit(id, workMinutes, null),
+  noFreezeExpected: true,
 });
 const capacity = (request: Partial<CapacityRequest>): SeasonCapacity => {
   const result = seasonCapacity({ today, visits: [], crews: [], travelMinutesPerVisit: 20, ...request });
@@ -62,7 +66,7 @@ describe('seasonCapacity', () => {
         { ...visit('not ready', 30, dayAfter(1)), earliestDate: dayAfter(2) },
         { ...visit('no crew', 30, dayAfter(2)), crewIds: ['idle'] },
         visit('long', 200, dayAfter(2)),
-        visit('mild site', 30, 'none'),
+        mildSite('mild site', 30),
       ],
     });
     expect(reasons(result).sort()).toEqual([
@@ -81,7 +85,7 @@ describe('seasonCapacity', () => {
   });
 
   it('says that 20 minutes of driving a visit are assumed (common practice, no source)', () => {
-    const result = seasonCapacity({ today, visits: [visit('a', 40, 'none')], crews: [crew('north', 1)] });
+    const result = seasonCapacity({ today, visits: [mildSite('a', 40)], crews: [crew('north', 1)] });
     if (!result.ok) throw new Error(JSON.stringify(result.error));
     expect(result.value.minutesNeeded).toBe(60);
     expect(result.value.explanation.assumed).toMatchObject([{ field: 'travelMinutesPerVisit', value: 20 }]);
@@ -152,13 +156,13 @@ describe('seasonCapacity', () => {
     const ask = (request: Partial<CapacityRequest>): unknown =>
       seasonCapacity({ today, visits: [], crews: [], ...request });
     expect(ask({ today: '2026-10-32' })).toMatchObject({ error: { field: 'today' } });
-    expect(ask({ visits: [visit('a', -1, 'none')] })).toMatchObject({
+    expect(ask({ visits: [mildSite('a', -1)] })).toMatchObject({
       error: { field: 'visit a: workMinutes' },
     });
     expect(ask({ visits: [visit('a', 30, 'soon')] })).toMatchObject({
       error: { field: 'visit a: finishBy' },
     });
-    expect(ask({ visits: [visit('a', 30, 'none'), visit('a', 30, 'none')] })).toMatchObject({
+    expect(ask({ visits: [mildSite('a', 30), mildSite('a', 30)] })).toMatchObject({
       error: { field: 'visits' },
     });
     expect(ask({ crews: [{ id: 'a', days: [{ date: today, minutes: 1500 }] }] })).toMatchObject({

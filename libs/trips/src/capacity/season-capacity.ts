@@ -1,7 +1,6 @@
-import type { Result } from '@rimeward/units';
+import { type Result, success } from '@rimeward/units';
 import type { LocalDate } from '../calendar/local-date';
 import type { Explanation } from '../explain/explanation';
-import { success } from '../explain/outcome';
 import type { CapacityRequest } from './capacity-request';
 import { checkCapacityRequest } from './check-request';
 import { hoursByDate, minutesBetween, type HoursByDate } from './hours-by-date';
@@ -37,16 +36,15 @@ export function seasonCapacity(request: CapacityRequest): Result<SeasonCapacity>
   const travelMinutes = request.travelMinutesPerVisit ?? 20;
   const left: LeftVisit[] = [];
   const known: PlaceableVisit[] = [];
-  for (const { id, workMinutes, finishBy, earliestDate, crewIds } of visits) {
+  for (const { id, workMinutes, finishBy, noFreezeExpected, earliestDate, crewIds } of visits) {
     if (workMinutes === null) left.push({ visitId: id, reason: 'needs-work-minutes' });
-    else if (finishBy === null) left.push({ visitId: id, reason: 'needs-finish-by' });
-    else if (finishBy < today && finishBy !== 'none')
-      left.push({ visitId: id, reason: 'freeze-date-passed' });
+    else if (finishBy === null && !noFreezeExpected) left.push({ visitId: id, reason: 'needs-finish-by' });
+    else if (finishBy !== null && finishBy < today) left.push({ visitId: id, reason: 'freeze-date-passed' });
     else
       known.push({
         id,
         minutes: workMinutes + travelMinutes,
-        lastDate: finishBy === 'none' ? null : finishBy,
+        lastDate: finishBy,
         earliestDate: earliestDate ?? null,
         crewIds: crewIds ?? null,
       });

@@ -1,8 +1,7 @@
-import type { Result } from '@rimeward/units';
+import { needs, outOfRange, type Result, success } from '@rimeward/units';
 import { dayOfColdSeason } from '../calendar/cold-season';
 import { dayOf365, isLocalDate, type LocalDate } from '../calendar/local-date';
 import type { Explanation } from '../explain/explanation';
-import { needs, outOfRange, success } from '../explain/outcome';
 import {
   firstFreezeEntry,
   normalsElement,

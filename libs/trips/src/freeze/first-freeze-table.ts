@@ -1,5 +1,4 @@
-import type { Result } from '@rimeward/units';
-import { needs, outOfRange, success } from '../explain/outcome';
+import { needs, outOfRange, type Result, success } from '@rimeward/units';
 
 /** Temperatures, F, for which the climate normals publish a date of first freeze. */
 export const thresholdsF = [16, 20, 24, 28, 32, 36] as const;

@@ -1,7 +1,6 @@
-import type { Result } from '@rimeward/units';
+import { needs, outOfRange, type Result, success } from '@rimeward/units';
 import { dateOfDay, dayNumber, type LocalDate } from '../calendar/local-date';
 import type { Explanation } from '../explain/explanation';
-import { needs, outOfRange, success } from '../explain/outcome';
 import { chanceOfFreezeBy, type ChanceByDate } from './chance-by-date';
 import type { FreezeDateRequest } from './freeze-date-request';
 import { warningWindowHours } from './freeze-kind';

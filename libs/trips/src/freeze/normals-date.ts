@@ -1,7 +1,6 @@
-import type { Result } from '@rimeward/units';
+import { type Result, success } from '@rimeward/units';
 import { dateInColdSeason } from '../calendar/cold-season';
 import type { LocalDate } from '../calendar/local-date';
-import { success } from '../explain/outcome';
 import {
   firstFreezeEntry,
   type FirstFreezeTable,

@@ -1,6 +1,5 @@
-import type { Result } from '@rimeward/units';
+import { needs, outOfRange, type Result, success } from '@rimeward/units';
 import { dateOfDay, type LocalDate } from '../calendar/local-date';
-import { needs, outOfRange, success } from '../explain/outcome';
 import { freezeKind, type FreezeKind } from './freeze-kind';
 import { localDateOf, readZonedTime, type ZonedTime } from './forecast-time';
 

@@ -1,8 +1,8 @@
-import type { Result } from '@rimeward/units';
+import { outOfRange, type Result, success, within } from '@rimeward/units';
 import { coldSeasonStartYear } from '../calendar/cold-season';
 import type { LocalDate } from '../calendar/local-date';
 import type { Assumption } from '../explain/explanation';
-import { firstFailure, outOfRange, success, within } from '../explain/outcome';
+import { firstFailure } from '../explain/first-failure';
 import { publishedPercents, thresholdsF, type PublishedPercent, type ThresholdF } from './first-freeze-table';
 import type { FreezeDateRequest } from './freeze-date-request';
 

@@ -1,5 +1,4 @@
-import type { Result } from '@rimeward/units';
-import { outOfRange, success } from '../explain/outcome';
+import { outOfRange, type Result, success } from '@rimeward/units';
 
 /** Cost of going from each place to each other, row by row. The same both ways. */
 export interface CostMatrix {

@@ -1,5 +1,5 @@
-import type { Result } from '@rimeward/units';
-import { firstFailure, needs, outOfRange, success, within, type Failure } from '../explain/outcome';
+import { type Failure, needs, outOfRange, type Result, success, within } from '@rimeward/units';
+import { firstFailure } from '../explain/first-failure';
 import { checkPoint, haversineM, type GeoPoint } from '../travel/great-circle';
 import { minutesForDistance, settleTravel, type SettledTravel } from '../travel/travel-minutes';
 import { costMatrix } from './cost-matrix';

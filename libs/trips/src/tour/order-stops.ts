@@ -1,6 +1,5 @@
-import type { Result } from '@rimeward/units';
+import { type Result, success } from '@rimeward/units';
 import type { Explanation } from '../explain/explanation';
-import { success } from '../explain/outcome';
 import type { RandomSource } from '../random/seeded-random';
 import { placeDay, type DayPlaces } from './day-places';
 import type { DayRequest } from './day-request';

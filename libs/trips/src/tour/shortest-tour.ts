@@ -1,5 +1,4 @@
-import type { Result } from '@rimeward/units';
-import { needs, outOfRange, success } from '../explain/outcome';
+import { needs, outOfRange, type Result, success } from '@rimeward/units';
 import type { RandomSource } from '../random/seeded-random';
 import { checkCosts, costMatrix, costOf, type CostMatrix } from './cost-matrix';
 import { cheapestOrder, exactPlaces } from './held-karp';

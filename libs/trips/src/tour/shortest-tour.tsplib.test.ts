@@ -30,7 +30,7 @@ describe('tours against TSPLIB optima (published)', () => {
         expect(tour.value.length).toBeGreaterThanOrEqual(optimum);
         expect(tour.value.length).toBeLessThanOrEqual(optimum * 1.02);
       }
-    });
+    }, 30_000);
 
     it(`${name}: the optimum ${optimum} itself is found from one of ten seeds`, () => {
       const costs = tsplibCosts(name);
@@ -40,7 +40,7 @@ describe('tours against TSPLIB optima (published)', () => {
         if (tour.ok) shortest = Math.min(shortest, tour.value.length);
       }
       expect(shortest).toBe(optimum);
-    });
+    }, 30_000);
   }
 
   it('burma14: is small enough for the exact method, which gives 3323', () => {
@@ -85,5 +85,5 @@ describe('tours against exact optima of an integer program (independent, scipy w
         expect(tour.value.length).toBeGreaterThanOrEqual(optimum);
         expect(tour.value.length).toBeLessThanOrEqual(optimum * 1.02);
       }
-    });
+    }, 30_000);
 });

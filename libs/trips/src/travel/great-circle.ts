@@ -1,5 +1,5 @@
-import type { Result } from '@rimeward/units';
-import { firstFailure, success, within, type Failure } from '../explain/outcome';
+import { type Failure, type Result, success, within } from '@rimeward/units';
+import { firstFailure } from '../explain/first-failure';
 
 /** A place on the ground in degrees, WGS 84; north and east are positive. */
 export interface GeoPoint {

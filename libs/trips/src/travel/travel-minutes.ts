@@ -1,6 +1,6 @@
-import type { Result } from '@rimeward/units';
+import { type Result, success, within } from '@rimeward/units';
 import type { Assumption, Explanation } from '../explain/explanation';
-import { firstFailure, success, within } from '../explain/outcome';
+import { firstFailure } from '../explain/first-failure';
 import { checkPoint, haversineM, type GeoPoint } from './great-circle';
 
 /** How straight distance becomes driving time. What is left out is assumed and listed in the explanation. */
