@@ -20,6 +20,7 @@ export default tseslint.config(
           './apps/web/src/service-worker/tsconfig.json',
           './apps/e2e/tsconfig.json',
           './tools/simulate/tsconfig.json',
+          './tools/bench/phone/tsconfig.json',
         ],
         tsconfigRootDir: import.meta.dirname,
       },

@@ -11,6 +11,8 @@ export function phoneTransport(
   serverNow: () => number,
   alive: (sent: Promise<Sent>) => Promise<Sent>,
 ): Transport {
+  // A model's mistake must reject, not throw past the network.
+  const soon = <T>(work: () => T): Promise<T> => Promise.resolve().then(work);
   const stamped = <T extends object>(reply: T) => ({
     ...reply,
     serverTime: new Date(serverNow()).toISOString(),
@@ -27,14 +29,14 @@ export function phoneTransport(
   };
   return {
     push: (batch, limitMs) => ask(limitMs, async () => stamped(await office.push(batch))),
-    announce: (photos, limitMs) => ask(limitMs, async () => office.announce(photos)),
+    announce: (photos, limitMs) => ask(limitMs, () => soon(() => office.announce(photos))),
     sendPreview: (sha256, _bytes, limitMs) =>
-      ask(limitMs, async () => office.storePart(sha256, -1, new Uint8Array())),
+      ask(limitMs, () => soon(() => office.storePart(sha256, -1, new Uint8Array()))),
     sendPart: (sha256, part, bytes, limitMs) =>
-      ask(limitMs, async () => office.storePart(sha256, part, spoil(bytes))),
+      ask(limitMs, () => soon(() => office.storePart(sha256, part, spoil(bytes)))),
     complete: (sha256, limitMs) => ask(limitMs, () => office.complete(sha256)),
     pull: (place, limit, limitMs) =>
-      ask(limitMs, async () => stamped(office.pull(place, Math.min(limit, 20)))),
+      ask(limitMs, () => soon(() => stamped(office.pull(place, Math.min(limit, 20))))),
     renewSession: () => Promise.resolve('renewed'),
   };
 }

@@ -1,4 +1,10 @@
-import { sealEntry, startLoop, type DeliveryLoop, type LoopStatus } from '@rimeward/delivery';
+import {
+  sealEntry,
+  startLoop,
+  type DeliveryLoop,
+  type LoopStatus,
+  type ReceiptReading,
+} from '@rimeward/delivery';
 import { codec, sha256Hex } from '../codec';
 import type { Network } from '../network';
 import type { Office } from '../office/office';
@@ -112,16 +118,17 @@ export class Phone {
         transport: phoneTransport(this.office, this.network, this.random, serverNow, (sent) =>
           page.live(sent),
         ),
-        readReceipt: async (receipt) => ({
-          ...(JSON.parse(receipt) as { device: string; acknowledgedThrough: number; hash: string }),
-          verified: true,
-        }),
+        readReceipt: (receipt) => {
+          const claims = JSON.parse(receipt) as Omit<ReceiptReading, 'verified'>;
+          return Promise.resolve({ ...claims, verified: true });
+        },
         noteFault: (error) => {
           if (!(error instanceof StorageFailed)) throw error;
         },
       },
-      async (status) => {
+      (status) => {
         this.lastStatus = status;
+        return Promise.resolve();
       },
     );
   }
