@@ -1,7 +1,7 @@
 // Delivery from HTTP to committed rows, against a bare insert of the same bytes and against PouchDB to express-pouchdb, in the
 // same run on the same machine. Prints ratios beside their limits; ends with 1 when a limit is missed.
 import { readFileSync } from 'node:fs';
-import { mkdtemp, rm } from 'node:fs/promises';
+import { chmod, mkdtemp, rm } from 'node:fs/promises';
 import { createRequire } from 'node:module';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -18,15 +18,25 @@ import { measureRaw } from './raw-insert.mjs';
 const { Client } = createRequire(import.meta.url)('pg');
 const entries = Number(process.env.BENCH_ENTRIES ?? 10_000);
 const rounds = Number(process.env.BENCH_ROUNDS ?? 3);
-const entryBytes = 450;
 const batch = 100;
 const limits = { raw: 0.35, pouch: 3, memoryMb: 250 };
 
 const middle = (values) => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)];
 const peakMb = (pid) => Number(/VmHWM:\s+(\d+)/.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))[1]) / 1_024;
 
+/** Waits until what was delivered has been projected too: its memory counts. */
+async function projected(admin) {
+  for (;;) {
+    const { rows } = await admin.query('select count(*)::int as waiting from stale_projections');
+    if (rows[0].waiting === 0) return;
+    await new Promise((resolve) => setTimeout(resolve, 250));
+  }
+}
+
 await build(['api']);
+// PostgreSQL may run as another user, who has to enter it.
 const dataDir = await mkdtemp(join(tmpdir(), 'rimeward-bench-delivery-'));
+await chmod(dataDir, 0o755);
 const cluster = await startCluster({ dataDir, superPassword: readSecrets(dataDir).superPassword });
 const product = await startProduct({ adminUrl: cluster.adminUrl, dataDir, databaseName: 'bench' });
 const admin = new Client({ connectionString: product.adminDatabaseUrl });
@@ -40,7 +50,6 @@ try {
       actor: office.actor,
       visits: office.visits,
       entries,
-      entryBytes,
     };
     const one = makeChains({ ...chains, phones: 1 });
     const fifty = makeChains({ ...chains, phones: 50 });
@@ -62,9 +71,9 @@ try {
         `${entries} entries of ${rows[0].bytes} bytes, batches of ${batch}, ${rounds} rounds, medians.`,
       );
   }
+  await projected(admin);
   const memoryMb = peakMb(product.apiPid);
-  const sample = makeChains({ company: 'c', actor: 'a', visits: ['v'], phones: 1, entries, entryBytes })[0]
-    .texts;
+  const sample = makeChains({ company: 'c', actor: 'a', visits: ['v'], phones: 1, entries })[0].texts;
   const pouch = await measurePouch(sample, batch);
   const [raw, one, fifty] = [rates.raw, rates.one, rates.fifty].map(middle);
   console.log(`raw multi-row insert   ${Math.round(raw)}/s`);

@@ -3,8 +3,9 @@ import { CompanyContext } from '../database/company-context';
 import { VisitProjector } from './visit-projector';
 import { markUnprojected, noteFailure, staleVisits } from './stale-rows';
 
-/** Pushes follow each other: what they change is projected together, this long after the first of them. */
-const delayMs = 500;
+/** Pushes follow each other: what they change is projected together once they have paused, but not later than the last limit. */
+const pauseMs = 1_000;
+const longestWaitMs = 10_000;
 const visitsAtOnce = 100;
 
 /**
@@ -14,7 +15,7 @@ const visitsAtOnce = 100;
 @Injectable()
 export class ProjectionService implements OnModuleDestroy {
   private readonly logger = new Logger(ProjectionService.name);
-  private readonly timers = new Map<string, NodeJS.Timeout>();
+  private readonly timers = new Map<string, { timer: NodeJS.Timeout; until: number }>();
   private readonly running = new Map<string, Promise<void>>();
 
   constructor(
@@ -23,19 +24,22 @@ export class ProjectionService implements OnModuleDestroy {
   ) {}
 
   onModuleDestroy(): void {
-    for (const timer of this.timers.values()) clearTimeout(timer);
+    for (const { timer } of this.timers.values()) clearTimeout(timer);
     this.timers.clear();
   }
 
   /** Something of this company has changed and is committed. Returns at once. */
   wake(companyId: string): void {
-    if (this.timers.has(companyId)) return;
-    const timer = setTimeout(() => {
+    const waiting = this.timers.get(companyId);
+    clearTimeout(waiting?.timer);
+    const until = waiting?.until ?? Date.now() + longestWaitMs;
+    const run = (): void => {
       this.timers.delete(companyId);
       void this.freshen(companyId);
-    }, delayMs);
+    };
+    const timer = setTimeout(run, Math.min(pauseMs, Math.max(0, until - Date.now())));
     timer.unref();
-    this.timers.set(companyId, timer);
+    this.timers.set(companyId, { timer, until });
   }
 
   /** Brings the copies up to date if it can; what asks for it goes on with older ones if it cannot. */

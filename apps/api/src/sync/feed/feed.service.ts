@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
 import { companySetting as company } from '../../database/protect-table';
+import { markStaleSql } from './stale-sql';
 
 /** A change that readers of the feed have to hear of. */
 export type FeedChange =
@@ -47,12 +48,7 @@ export class FeedService {
 
 /** Notes that the at-a-glance copy of these visits is older than what this transaction writes. */
 export async function markStale(manager: EntityManager, visitIds: readonly string[]): Promise<void> {
-  await manager.query(
-    `insert into stale_projections (company_id, visit_id)
-     select ${company}, id from unnest($1::uuid[]) as id order by id
-     on conflict (company_id, visit_id) do update set attempts = 0, mark = gen_random_uuid()`,
-    [[...new Set(visitIds)]],
-  );
+  await manager.query(markStaleSql('$1'), [[...new Set(visitIds)]]);
 }
 
 function feedRow(change: FeedChange, index: number): object {

@@ -2,21 +2,28 @@ import type { HeldReason, Manifest } from '@rimeward/contracts';
 import { noPrevious } from '@rimeward/delivery';
 import type { EntityManager } from 'typeorm';
 import type { ChainHead, KnownEntry, PlacedEntry } from './place-entries';
+import { markStaleSql } from '../feed/stale-sql';
 import { copyable } from './copyable';
+import { missingPhotosSql } from './photo-references';
 import { companySetting as company } from '../../database/protect-table';
 
-/** Locks a device's chain until the transaction ends, keeps what the phone tells of itself, and reads the newest link. */
+export interface LockedChain extends ChainHead {
+  /** Photographs that stored entries name and the office does not have. */
+  missing: string[];
+}
+
+/** Locks a device's chain until the transaction ends, keeps what the phone tells of itself, and reads where it stands. */
 export async function lockChain(
   manager: EntityManager,
   device: string,
   manifest: Manifest,
-): Promise<ChainHead> {
-  const rows = await manager.query<{ seq: number; hash: string }[]>(
+): Promise<LockedChain> {
+  const rows = await manager.query<LockedChain[]>(
     `insert into device_chains (company_id, device_id, seq, hash, manifest, last_contact_at)
      values (${company}, $1, 0, decode($2, 'hex'), $3, clock_timestamp())
      on conflict (company_id, device_id)
        do update set manifest = excluded.manifest, last_contact_at = excluded.last_contact_at
-     returning seq, encode(hash, 'hex') as hash`,
+     returning seq, encode(hash, 'hex') as hash, array(${missingPhotosSql}) as missing`,
     [device, noPrevious, JSON.stringify(manifest)],
   );
   const head = rows[0];
@@ -41,12 +48,15 @@ export async function knownEntries(
 }
 
 /**
- * One statement: takes positions under the company's counter, writes the rows, moves the chain's head. The bytes travel as one
- * binary value and are cut apart by the database, so that they arrive unescaped.
+ * One statement: marks the visits' copies as stale, then takes positions under the company's counter, writes the rows, moves
+ * the chain's head. The bytes travel as one binary value and are cut apart by the database, so that they arrive unescaped.
  */
 const appendSql = `
-  with taken as (
-    insert into company_positions (company_id, position) values (${company}, $1::bigint)
+  with stale as (
+    ${markStaleSql('$16')} returning visit_id
+  ), taken as (
+    insert into company_positions (company_id, position)
+    select ${company}, $1::bigint where (select count(*) from stale) >= 0
     on conflict (company_id) do update set position = company_positions.position + excluded.position
     returning company_id, position - $1::bigint as base
   ), written as (
@@ -77,6 +87,7 @@ export async function appendEntries(
   device: string,
   placed: readonly PlacedEntry[],
   head: ChainHead,
+  visits: readonly string[],
 ): Promise<number[]> {
   let start = 1;
   const starts = placed.map(({ entry }) => (start += entry.bytes.length) - entry.bytes.length);
@@ -98,6 +109,7 @@ export async function appendEntries(
     placed.map(({ heldReason }) => heldReason),
     head.seq,
     head.hash,
+    visits,
   ]);
   const written = new Map(rows.map((row) => [row.seq, row]));
   return placed.map(({ seq, entry }) => {

@@ -64,11 +64,11 @@ export class PushService {
       known: await this.known(manager, device.deviceId, head, batch),
       ...(await this.references.among(manager, device.companyId, batch)),
     });
-    const visits = await this.write(manager, device.deviceId, placement);
+    const { visits, named } = await this.write(manager, device.deviceId, placement);
     return {
       results: placement.results,
       head: placement.head,
-      missing: await missingPhotos(manager, device.deviceId),
+      missing: named ? await missingPhotos(manager, device.deviceId) : head.missing,
       changed: visits.length > 0,
     };
   }
@@ -90,16 +90,24 @@ export class PushService {
     );
   }
 
-  /** Everything that waits for other locks comes first; the company's counter is taken last. */
-  private async write(manager: EntityManager, device: string, placement: Placement): Promise<string[]> {
-    const { append, strays, head } = placement;
-    const visits = [...new Set([...append, ...strays].flatMap(({ entry }) => entry.visit ?? []))];
-    if (visits.length > 0) await markStale(manager, visits);
+  /** Marks before positions: whatever waits for other locks must not hold the company's counter. */
+  private async write(
+    manager: EntityManager,
+    device: string,
+    { append, strays, head }: Placement,
+  ): Promise<{ visits: string[]; named: boolean }> {
+    const visits = visitsOf([...append, ...strays]);
+    if (strays.length > 0 && visits.length > 0) await markStale(manager, visits);
+    let named = false;
     if (append.length > 0) {
-      const positions = await appendEntries(manager, device, append, head);
-      await referPhotos(manager, device, append, positions);
+      const positions = await appendEntries(manager, device, append, head, visits);
+      named = await referPhotos(manager, device, append, positions);
     }
     await keepStrays(manager, device, strays);
-    return visits;
+    return { visits, named };
   }
+}
+
+function visitsOf(entries: readonly { entry: ReadEntry }[]): string[] {
+  return [...new Set(entries.flatMap(({ entry }) => entry.visit ?? []))];
 }
