@@ -80,6 +80,6 @@ describe('startDelivery', () => {
     expect(stored(first.deviceId)).toBe(0);
     await enrolTechnician(1, { verifyKey: office.verifyKey });
     await vi.waitFor(() => expect(stored(first.deviceId)).toBe(1), 5_000);
-    expect((await unsentWork()).entries).toBe(0);
+    await vi.waitFor(async () => expect((await unsentWork()).entries).toBe(0), 5_000);
   });
 });
