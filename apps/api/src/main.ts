@@ -11,6 +11,7 @@ async function start(): Promise<void> {
   readEnvironment();
   const app = await NestFactory.create<NestExpressApplication>(AppModule, {
     bufferLogs: true,
+    abortOnError: false,
     bodyParser: false,
   });
   app.useLogger(app.get(Logger));
@@ -21,5 +22,5 @@ async function start(): Promise<void> {
 
 start().catch((error: unknown) => {
   console.error(error instanceof EnvironmentFault ? error.message : error);
-  process.exitCode = 1;
+  process.exit(1);
 });

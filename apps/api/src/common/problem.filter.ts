@@ -52,10 +52,15 @@ function statusOf(thrown: unknown): number | null {
   return typeof status === 'number' && status >= 400 && status < 500 ? status : null;
 }
 
-/** Codes of PostgreSQL (class 08, 53, 57P: no connection; 22: a value that it cannot hold) and of the network. */
+/** The pool and the driver name these faults by their text alone. */
+const lostConnection =
+  /Connection terminated|timeout exceeded when trying to connect|Client has encountered a connection error/;
+
+/** Codes of PostgreSQL (08, 53, 57P, 3D: no connection; 22: a value that it cannot hold) and of the network. */
 function codeOfFault(thrown: unknown): ProblemCode {
-  const code = (thrown as { code?: unknown } | null)?.code;
+  const { code, message } = (thrown ?? {}) as { code?: unknown; message?: unknown };
+  if (typeof message === 'string' && lostConnection.test(message)) return 'unavailable';
   if (typeof code !== 'string') return 'internal';
-  if (/^(ECONN|EPIPE|ETIMEDOUT|ENOTFOUND)/.test(code) || /^(08|57P|53)/.test(code)) return 'unavailable';
+  if (/^(ECONN|EPIPE|ETIMEDOUT|ENOTFOUND)/.test(code) || /^(08|53|57P|3D)/.test(code)) return 'unavailable';
   return /^22[0-9A-Z]{3}$/.test(code) ? 'bad-request' : 'internal';
 }

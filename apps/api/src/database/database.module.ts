@@ -6,6 +6,13 @@ import { CompanyContext } from './company-context';
 import { dataSourceOptions } from './data-source';
 import { DatabaseReadiness } from './readiness';
 
+/** Nothing waits for ever: a lost database or a lock that nobody lets go becomes an answer, ms. */
+const waits = {
+  connectionTimeoutMillis: 10_000,
+  statement_timeout: 30_000,
+  idle_in_transaction_session_timeout: 30_000,
+};
+
 @Global()
 @Module({
   imports: [
@@ -16,6 +23,7 @@ import { DatabaseReadiness } from './readiness';
         poolSize: environment.DATABASE_POOL,
         retryAttempts: 3,
         retryDelay: 500,
+        extra: waits,
       }),
     }),
   ],
