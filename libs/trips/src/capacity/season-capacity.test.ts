@@ -84,6 +84,11 @@ describe('seasonCapacity', () => {
     ]);
   });
 
+  it('does not call a visit that just fills a day longer than any day', () => {
+    const visits = [visit('first', 80, dayAfter(0)), visit('second', 80, dayAfter(0))];
+    expect(reasons(capacity({ crews: [crew('north', 1, 100)], visits }))).toEqual(['second no-hours-left']);
+  });
+
   it('says that 20 minutes of driving a visit are assumed (common practice, no source)', () => {
     const result = seasonCapacity({ today, visits: [mildSite('a', 40)], crews: [crew('north', 1)] });
     if (!result.ok) throw new Error(JSON.stringify(result.error));

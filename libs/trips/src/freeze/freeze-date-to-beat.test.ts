@@ -92,6 +92,16 @@ describe('freezeDateToBeat', () => {
     expect([result.freezeDate, result.setBy]).toEqual(['2026-10-01', 'end-of-forecast']);
   });
 
+  it('counts a forecast that starts with the next full hour as unbroken, one that starts later as not', () => {
+    const after = (start: string): string | null =>
+      dateOf({
+        nowIso: '2026-09-28T11:20:00-06:00',
+        normals: denver,
+        forecast: hourly(start, mild(72)),
+      }).freezeDate;
+    expect([after('2026-09-28T12:00'), after('2026-09-28T13:00')]).toEqual(['2026-10-01', '2026-09-28']);
+  });
+
   it('trusts no hour without a temperature: clear days end there, and the hour is listed as missing', () => {
     const forecast = hourly('2026-09-24T12:00', [...mild(40), null, ...mild(60)]);
     const result = dateOf({ nowIso: '2026-09-24T12:00:00-06:00', normals: denver, forecast });
