@@ -6,7 +6,7 @@ import { FeedModule } from './feed/feed.module';
 import { FeedItems } from './pull/feed-items.service';
 import { PullController } from './pull/pull.controller';
 import { PullService } from './pull/pull.service';
-import { KnownReferences } from './push/known-references';
+import { KnownVisits } from './push/known-visits';
 import { PushController } from './push/push.controller';
 import { PushService } from './push/push.service';
 import { Receipts } from './push/receipts';
@@ -15,6 +15,6 @@ import { Receipts } from './push/receipts';
 @Module({
   imports: [CompaniesModule, FeedModule, ProjectionModule, VisitsModule],
   controllers: [PushController, PullController],
-  providers: [PushService, KnownReferences, Receipts, PullService, FeedItems],
+  providers: [PushService, KnownVisits, Receipts, PullService, FeedItems],
 })
 export class SyncModule {}

@@ -52,7 +52,7 @@ function around(over: Partial<Surroundings> = {}): Surroundings {
     firstPending: 1,
     known: new Map(),
     visits: new Set([visit]),
-    actors: new Set([actor]),
+    person: actor,
     ...over,
   };
 }

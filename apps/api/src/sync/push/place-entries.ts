@@ -23,7 +23,8 @@ export interface Surroundings {
   /** Entries of this device that the office has, for the sequence numbers of the batch. */
   known: ReadonlyMap<number, KnownEntry>;
   visits: ReadonlySet<string>;
-  actors: ReadonlySet<string>;
+  /** Whose device it is: he alone writes on it. */
+  person: string;
 }
 
 export interface PlacedEntry {
@@ -96,7 +97,7 @@ function reasonToHold(entry: ReadEntry, head: ChainHead, around: Surroundings): 
   if (entry.fault !== null) return entry.fault;
   if (entry.company !== around.company || entry.visit === null || !around.visits.has(entry.visit))
     return 'foreign-visit';
-  if (entry.actor === null || !around.actors.has(entry.actor)) return 'foreign-actor';
+  if (entry.actor !== around.person) return 'foreign-actor';
   return null;
 }
 

@@ -6,7 +6,7 @@ import { CompanyContext } from '../../database/company-context';
 import { ProjectionService } from '../../projection/projection.service';
 import { markStale } from '../feed/feed.service';
 import { appendEntries, knownEntries, lockChain } from './chain-store';
-import { KnownReferences } from './known-references';
+import { KnownVisits } from './known-visits';
 import { missingPhotos, referPhotos } from './photo-references';
 import { placeEntries, type ChainHead, type Placement } from './place-entries';
 import { readEntry, type ReadEntry } from './read-entry';
@@ -25,7 +25,7 @@ interface Kept {
 export class PushService {
   constructor(
     private readonly context: CompanyContext,
-    private readonly references: KnownReferences,
+    private readonly visits: KnownVisits,
     private readonly projections: ProjectionService,
     private readonly receipts: Receipts,
   ) {}
@@ -62,7 +62,8 @@ export class PushService {
       head,
       firstPending: manifest.head - manifest.pendingEntries + 1,
       known: await this.known(manager, device.deviceId, head, batch),
-      ...(await this.references.among(manager, device.companyId, batch)),
+      visits: await this.visits.among(manager, device.companyId, batch),
+      person: device.userId,
     });
     const { visits, named } = await this.write(manager, device.deviceId, placement);
     return {
