@@ -9,3 +9,5 @@ export { rules, rulesById, RULES_VERSION } from './registry';
 export * from './thresholds';
 export { sentence, type RulesLanguage } from './texts/sentence';
 export type { Reader } from './texts/say';
+export { planForSystem } from './plan/plan-for-system';
+export { judgedPlan, type JudgedPlan, type PlanCircumstances } from './plan/rule-plan';

@@ -101,4 +101,4 @@ export const rulesById: Registry = {
 };
 
 /** The same rules as a list, in the same order. */
-export const rules: readonly Rule<RuleId>[] = Object.values(rulesById) as unknown as readonly Rule<RuleId>[];
+export const rules: readonly Rule<RuleId>[] = Object.values(rulesById);

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { defaultThresholds, safeLimits, thresholdsOf, type ThresholdChoices } from './thresholds';
+import { defaultThresholds, safeLimits, thresholdsOf } from './thresholds';
 
 const names = Object.keys(safeLimits) as (keyof typeof safeLimits)[];
 
@@ -16,7 +16,7 @@ describe('thresholds of a company', () => {
     });
     fc.assert(
       fc.property(choices, (chosen) => {
-        const thresholds = thresholdsOf(chosen as ThresholdChoices);
+        const thresholds = thresholdsOf(chosen);
         for (const name of names) {
           const [low, high] = safeLimits[name];
           expect(thresholds[name]).toBeGreaterThanOrEqual(low);

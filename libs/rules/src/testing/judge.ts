@@ -45,7 +45,7 @@ export function before(type: Line['type'], added: readonly Line[], lines: readon
 /** A clean visit in which the bodies of a type are changed. */
 export function changed(type: Line['type'], body: object, lines: readonly Line[] = clean): Line[] {
   return lines.map((line) =>
-    line.type === type ? ({ ...line, body: { ...line.body, ...body } } as Line) : line,
+    line.type === type ? ({ ...line, body: { ...line.body, ...body } }) : line,
   );
 }
 

@@ -100,7 +100,7 @@ checkRule('rest-too-short', {
 /** Zone 2 ends the clean visit; its air goes on once more after a rest. */
 function zoneAgain(wait: number): Line[] {
   return third('mist', wait).map(
-    (one) => ({ ...one, body: 'zoneId' in one.body ? { ...one.body, zoneId: zoneTwo } : one.body }) as Line,
+    (one) => ({ ...one, body: 'zoneId' in one.body ? { ...one.body, zoneId: zoneTwo } : one.body }),
   );
 }
 
