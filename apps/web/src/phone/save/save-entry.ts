@@ -6,7 +6,7 @@ import { wakeDelivery } from '../delivery/wake';
 import { afterSave } from './after-save';
 import { dropBallast } from './ballast';
 import type { NewEntry } from './entry-draft';
-import { writeEntry, type Written } from './entry-transaction';
+import { writeEntry } from './entry-transaction';
 import { SaveRefused, type Refusal } from './save-refused';
 import { tellLiveQueries } from './tell-live-queries';
 
@@ -30,9 +30,8 @@ export async function saveEntry(entry: NewEntry): Promise<SaveResult> {
 }
 
 /** What follows a save and must not delay it. */
-function afterwards(written: Written): void {
+function afterwards(): void {
   setTimeout(() => {
-    tellLiveQueries(database(), written);
     wakeDelivery();
     afterSave();
   }, 0);
@@ -43,7 +42,8 @@ async function attempt(entry: NewEntry): Promise<SaveResult> {
     const db = database();
     if (!db.isOpen()) await db.open();
     const written = await writeEntry(db.backendDB(), entry, Date.now());
-    afterwards(written);
+    tellLiveQueries(db, written);
+    afterwards();
     return { ok: true, entry: written.row.entry };
   } catch (error) {
     if (error instanceof SaveRefused) return { ok: false, fault: error.fault };
