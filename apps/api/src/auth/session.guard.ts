@@ -26,7 +26,8 @@ export class SessionGuard extends AuthGuard('access') {
   }
 
   override handleRequest<T>(error: unknown, user: T | false): T {
-    if (error) throw error;
+    if (error instanceof Error) throw error;
+    if (error) throw new Error('The session could not be read', { cause: error });
     if (!user) throw new ProblemException('not-signed-in');
     return user;
   }

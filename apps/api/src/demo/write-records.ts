@@ -62,8 +62,7 @@ export async function writeSites(
   await manager.insert(Site, sites.map(siteRow));
   await manager.insert(
     System,
-    // The schema's strict types and TypeORM's deep-partial ones do not meet; the description is whole.
-    sites.map(({ id, system }) => ({ companyId, id: system.id, siteId: id, description: system as object })),
+    sites.map(({ id, system }) => ({ companyId, id: system.id, siteId: id, description: system })),
   );
   const summaries = sites.flatMap((site) => lastYearOf(site, today) ?? []);
   await manager.insert(

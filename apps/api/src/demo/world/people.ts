@@ -23,7 +23,10 @@ const person = (
   name: string,
   password: string,
   crew: number | null = null,
-  { language = 'en' as Language, blowOutSignedOff = role === 'technician' || role === 'supervisor' } = {},
+  {
+    language = 'en',
+    blowOutSignedOff = role === 'technician' || role === 'supervisor',
+  }: Partial<DemoPerson> = {},
 ): DemoPerson => ({
   id: idOf('person', name),
   role,
