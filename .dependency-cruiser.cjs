@@ -9,7 +9,12 @@ const only = (name, from, allowed) => ({
 
 module.exports = {
   forbidden: [
-    { name: 'no-cycles', severity: 'error', from: {}, to: { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } } },
+    {
+      name: 'no-cycles',
+      severity: 'error',
+      from: {},
+      to: { circular: true, viaOnly: { dependencyTypesNot: ['type-only'] } },
+    },
     { name: 'lib-imports-app', severity: 'error', from: { path: '^libs/' }, to: { path: '^(apps|tools)/' } },
     {
       name: 'app-imports-app',
@@ -70,18 +75,15 @@ module.exports = {
       from: { path: '^apps/web/src/phone/' },
       to: { path: '^apps/web/src/', pathNot: '^apps/web/src/phone/' },
     },
-    {
-      name: 'entities-are-private',
-      severity: 'warn',
-      from: { path: '^apps/api/src/([^/]+)/', pathNot: '^apps/api/src/(database|demo)/' },
-      to: { path: '^apps/api/src/[^/]+/entities/', pathNot: '^apps/api/src/$1/' },
-    },
   ],
   options: {
     doNotFollow: { path: 'node_modules' },
     exclude: { path: '(^|/)(dist|coverage)/' },
     tsConfig: { fileName: 'tsconfig.tests.json' },
     tsPreCompilationDeps: true,
-    enhancedResolveOptions: { exportsFields: ['exports'], conditionNames: ['source', 'import', 'require', 'node', 'default'] },
+    enhancedResolveOptions: {
+      exportsFields: ['exports'],
+      conditionNames: ['source', 'import', 'require', 'node', 'default'],
+    },
   },
 };

@@ -28,7 +28,11 @@ run(async () => {
     seedDemo: true,
     env: { NODE_ENV: 'development', PUBLIC_ORIGIN: origin },
   });
-  const compiler = spawn(join(root, 'node_modules/.bin/tsc'), ['-b', '-w', '--preserveWatchOutput', 'apps/api'], { cwd: root });
+  const compiler = spawn(
+    join(root, 'node_modules/.bin/tsc'),
+    ['-b', '-w', '--preserveWatchOutput', 'apps/api'],
+    { cwd: root },
+  );
   compiler.stdout.on('data', (part) => {
     process.stdout.write(part);
     if (String(part).includes('Found 0 errors')) void product.stopApi().then(() => product.startApi());

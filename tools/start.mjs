@@ -41,7 +41,13 @@ run(async () => {
   });
 
   try {
-    product = await startProduct({ adminUrl: cluster.adminUrl, dataDir, port, seedDemo: true, env: { LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn' } });
+    product = await startProduct({
+      adminUrl: cluster.adminUrl,
+      dataDir,
+      port,
+      seedDemo: true,
+      env: { LOG_LEVEL: process.env.LOG_LEVEL ?? 'warn' },
+    });
   } catch (error) {
     process.stderr.write(`${error.message}\n`);
     await stop(1);

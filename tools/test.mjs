@@ -17,7 +17,8 @@ run(async () => {
   const chosen = steps.filter(({ name, fast }) =>
     wanted.length === 0 ? true : wanted.includes('--fast') ? fast : wanted.includes(name),
   );
-  if (chosen.length === 0) throw new Fault(`There is no such step. Steps: ${steps.map(({ name }) => name).join(', ')}.`);
+  if (chosen.length === 0)
+    throw new Fault(`There is no such step. Steps: ${steps.map(({ name }) => name).join(', ')}.`);
   const needs = new Set(chosen.flatMap((step) => step.needs ?? []));
 
   mkdirSync(join(root, '.data'), { recursive: true });
@@ -25,10 +26,12 @@ run(async () => {
   let cluster = null;
   const clean = async () => {
     await cluster?.stop();
-    if (cluster && !cluster.folder.startsWith(folder)) rmSync(cluster.folder, { recursive: true, force: true });
+    if (cluster && !cluster.folder.startsWith(folder))
+      rmSync(cluster.folder, { recursive: true, force: true });
     rmSync(folder, { recursive: true, force: true });
   };
-  for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => void clean().then(() => process.exit(1)));
+  for (const signal of ['SIGINT', 'SIGTERM'])
+    process.on(signal, () => void clean().then(() => process.exit(1)));
 
   const env = { ...process.env, CHROMIUM_PATH: '/usr/bin/chromium', TEST_WORK_DIR: folder };
   let passed = 0;
@@ -46,7 +49,9 @@ run(async () => {
       passed += result.passed;
       failed += result.failed;
       if (result.output) say(result.output);
-      say(`${step.name}: ${result.passed} passed, ${result.failed} failed, ${Math.round((Date.now() - began) / 1_000)} s`);
+      say(
+        `${step.name}: ${result.passed} passed, ${result.failed} failed, ${Math.round((Date.now() - began) / 1_000)} s`,
+      );
     }
   } catch (error) {
     failed += 1;

@@ -168,6 +168,8 @@ describe('a day without signal', () => {
 
   it('delivers everything when the truck is back in range', async () => {
     await office.product.startApi();
+    // The session has ended meanwhile: the phone's own credential brings the log in all the same.
+    await phone.context.clearCookies();
     await phone.context.setOffline(false);
     await page.goto(`${office.product.origin}/on-this-phone`);
     await page.getByRole('button', { name: 'Deliver now' }).click();
@@ -187,7 +189,9 @@ describe('a day without signal', () => {
     const corrections = saved.filter(
       ({ text }) => (JSON.parse(text) as { type: string }).type === 'corrected',
     ).length;
-    await expect.poll(() => deskPage.locator('[data-entry]').count()).toBe(saved.length - corrections);
+    await expect
+      .poll(() => deskPage.locator('[data-entry]').count(), { timeout: 60_000, interval: 250 })
+      .toBe(saved.length - corrections);
     await deskPage.getByText('Photographs (12)').waitFor();
     const named = saved.flatMap(({ text }) => (JSON.parse(text) as { photos: { sha256: string }[] }).photos);
     expect(named).toHaveLength(12);
@@ -206,6 +210,12 @@ describe('a day without signal', () => {
     await deskPage.getByLabel('Question to the technician').fill('Which head of zone 3 does not turn?');
     await deskPage.getByRole('button', { name: 'Send back' }).click();
     await deskPage.getByText('Sent back by Nadine').waitFor();
+    await page.getByRole('link', { name: 'Sign in again', exact: true }).click();
+    const { email, password } = office.account('Marlo');
+    await page.getByLabel('E-mail').fill(email);
+    await page.getByLabel('Password', { exact: true }).fill(password);
+    await page.getByRole('button', { name: 'Sign in' }).click();
+    await page.waitForURL('**/on-this-phone');
     await page.getByRole('button', { name: 'Deliver now' }).click();
     await page.goto(`${office.product.origin}/today`);
     await page.getByText('Sent back: 1 question').waitFor({ timeout: 60_000 });

@@ -28,7 +28,8 @@ export async function build(names = Object.keys(parts)) {
     const part = parts[name];
     const mark = join(cache, `built-${name}`);
     const state = hashOf(part.inputs);
-    if (existsSync(join(root, part.output)) && existsSync(mark) && readFileSync(mark, 'utf8') === state) continue;
+    if (existsSync(join(root, part.output)) && existsSync(mark) && readFileSync(mark, 'utf8') === state)
+      continue;
     say(`Building ${name}.`);
     const [command, args] = part.command;
     const code = await runShown(command, args, { cwd: part.cwd });
@@ -52,7 +53,12 @@ function add(hash, path) {
     return;
   }
   for (const entry of entries.sort((a, b) => (a.name < b.name ? -1 : 1))) {
-    if (passedOver.has(entry.name) || entry.name.endsWith('.tsbuildinfo') || /\.(test|spec)\.tsx?$/.test(entry.name)) continue;
+    if (
+      passedOver.has(entry.name) ||
+      entry.name.endsWith('.tsbuildinfo') ||
+      /\.(test|spec)\.tsx?$/.test(entry.name)
+    )
+      continue;
     add(hash, join(path, entry.name));
   }
 }

@@ -9,7 +9,9 @@ export function lockDataDir(dataDir) {
   if (existsSync(file)) {
     const pid = Number(readFileSync(file, 'utf8'));
     if (pid !== process.pid && isLauncher(pid)) {
-      throw new Fault(`Rimeward already runs with the data in ${dataDir} (process ${pid}). Stop it, or set DATA_DIR to another folder.`);
+      throw new Fault(
+        `Rimeward already runs with the data in ${dataDir} (process ${pid}). Stop it, or set DATA_DIR to another folder.`,
+      );
     }
   }
   writeFileSync(file, String(process.pid));
@@ -19,7 +21,8 @@ export function lockDataDir(dataDir) {
 function isLauncher(pid) {
   const file = `/proc/${pid}/cmdline`;
   if (!Number.isInteger(pid) || pid <= 0) return false;
-  if (existsSync('/proc/self/cmdline')) return existsSync(file) && readFileSync(file, 'utf8').includes('tools/');
+  if (existsSync('/proc/self/cmdline'))
+    return existsSync(file) && readFileSync(file, 'utf8').includes('tools/');
   try {
     process.kill(pid, 0);
     return true;

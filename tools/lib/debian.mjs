@@ -20,6 +20,7 @@ export async function installPackage(name, reason) {
   ]) {
     const [first, ...rest] = [...prefix, ...args];
     const code = await runShown(first, rest, { env, stdio: ['ignore', 'ignore', 'inherit'] });
-    if (code !== 0 && args[1] === 'install') throw new Fault(`${reason} could not be installed. Try: sudo ${command}`);
+    if (code !== 0 && args[1] === 'install')
+      throw new Fault(`${reason} could not be installed. Try: sudo ${command}`);
   }
 }

@@ -17,7 +17,9 @@ export function checkNode() {
 
 /** Installs the packages of the lock file, unless exactly these are there already. */
 export async function installPackages() {
-  const lock = createHash('sha256').update(readFileSync(join(root, 'package-lock.json'))).digest('hex');
+  const lock = createHash('sha256')
+    .update(readFileSync(join(root, 'package-lock.json')))
+    .digest('hex');
   if (existsSync(marker) && readFileSync(marker, 'utf8') === lock) return;
   say('Installing the packages of the lock file.');
   const code = await runShown('npm', ['ci', '--no-audit', '--no-fund', '--loglevel=error'], { cwd: root });

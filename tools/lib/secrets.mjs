@@ -8,7 +8,11 @@ export function readSecrets(dataDir) {
   const file = join(dataDir, 'secrets.json');
   if (!existsSync(file)) {
     const random = () => randomBytes(32).toString('base64url');
-    const secrets = { superPassword: random(), passwords: { migrator: random(), app: random() }, sessionSecret: random() };
+    const secrets = {
+      superPassword: random(),
+      passwords: { migrator: random(), app: random() },
+      sessionSecret: random(),
+    };
     writeFileSync(file, JSON.stringify(secrets, null, 2), { mode: 0o600 });
   }
   const signingKeyFile = join(dataDir, 'signing-key.pem');

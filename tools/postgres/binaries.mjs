@@ -11,7 +11,8 @@ export async function postgresBinaries() {
   if (found) return found;
   await installPackage('postgresql', 'PostgreSQL');
   const now = installed();
-  if (!now) throw new Fault('PostgreSQL was installed, but its programs were not found under /usr/lib/postgresql.');
+  if (!now)
+    throw new Fault('PostgreSQL was installed, but its programs were not found under /usr/lib/postgresql.');
   return now;
 }
 

@@ -16,7 +16,8 @@ export async function startCluster({ dataDir, superPassword, durable = true }) {
   const owner = postgresOwner();
   const folder = clusterFolder(dataDir, owner);
   const data = join(folder, 'data');
-  if (!existsSync(join(data, 'PG_VERSION'))) makeCluster({ bin, owner, folder, data, superPassword, durable });
+  if (!existsSync(join(data, 'PG_VERSION')))
+    makeCluster({ bin, owner, folder, data, superPassword, durable });
   stopLeftover(bin, owner, data);
   const port = await freePort();
   const settings = {
@@ -27,8 +28,16 @@ export async function startCluster({ dataDir, superPassword, durable = true }) {
     logging_collector: 'off',
     ...(durable ? {} : { fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off' }),
   };
-  const args = ['-D', data, ...Object.entries(settings).flatMap(([name, value]) => ['-c', `${name}=${value}`])];
-  const child = spawn(join(bin, 'postgres'), args, { ...owner, stdio: ['ignore', 'ignore', 'pipe'], detached: true });
+  const args = [
+    '-D',
+    data,
+    ...Object.entries(settings).flatMap(([name, value]) => ['-c', `${name}=${value}`]),
+  ];
+  const child = spawn(join(bin, 'postgres'), args, {
+    ...owner,
+    stdio: ['ignore', 'ignore', 'pipe'],
+    detached: true,
+  });
   let told = '';
   child.stderr.on('data', (part) => (told = (told + part).slice(-4_000)));
   await ready(bin, port, child, () => told);
@@ -47,10 +56,25 @@ function makeCluster({ bin, owner, folder, data, superPassword, durable }) {
   const passwordFile = join(folder, 'password');
   writeFileSync(passwordFile, superPassword, { mode: 0o600 });
   if (owner) chownSync(passwordFile, owner.uid, owner.gid);
-  const args = ['-D', half, '-U', 'postgres', '-E', 'UTF8', '--locale=C.UTF-8', '--auth=scram-sha-256', `--pwfile=${passwordFile}`];
-  const made = spawnSync(join(bin, 'initdb'), durable ? args : [...args, '--no-sync'], { ...owner, cwd: '/', encoding: 'utf8' });
+  const args = [
+    '-D',
+    half,
+    '-U',
+    'postgres',
+    '-E',
+    'UTF8',
+    '--locale=C.UTF-8',
+    '--auth=scram-sha-256',
+    `--pwfile=${passwordFile}`,
+  ];
+  const made = spawnSync(join(bin, 'initdb'), durable ? args : [...args, '--no-sync'], {
+    ...owner,
+    cwd: '/',
+    encoding: 'utf8',
+  });
   rmSync(passwordFile, { force: true });
-  if (made.status !== 0) throw new Fault(`The database cluster could not be made: ${made.stderr || made.error}`);
+  if (made.status !== 0)
+    throw new Fault(`The database cluster could not be made: ${made.stderr || made.error}`);
   renameSync(half, data);
 }
 
@@ -61,7 +85,11 @@ function stopLeftover(bin, owner, data) {
   const pid = Number(readFileSync(file, 'utf8').split('\n')[0]);
   const command = existsSync(`/proc/${pid}/cmdline`) ? readFileSync(`/proc/${pid}/cmdline`, 'utf8') : '';
   if (command.includes('postgres') && command.includes(data)) {
-    spawnSync(join(bin, 'pg_ctl'), ['stop', '-D', data, '-m', 'fast', '-t', '20'], { ...owner, cwd: '/', stdio: 'ignore' });
+    spawnSync(join(bin, 'pg_ctl'), ['stop', '-D', data, '-m', 'fast', '-t', '20'], {
+      ...owner,
+      cwd: '/',
+      stdio: 'ignore',
+    });
   } else {
     rmSync(file, { force: true });
   }

@@ -10,11 +10,15 @@ export async function prepareDatabase({ adminUrl, name, passwords }) {
   await asAdmin(adminUrl, async (client) => {
     for (const role of ['migrator', 'app']) {
       const found = await client.query('select from pg_roles where rolname = $1', [`rimeward_${role}`]);
-      if (found.rowCount === 0) await client.query(`create role rimeward_${role} login nosuperuser nobypassrls nocreatedb nocreaterole`);
+      if (found.rowCount === 0)
+        await client.query(
+          `create role rimeward_${role} login nosuperuser nobypassrls nocreatedb nocreaterole`,
+        );
       await client.query(`alter role rimeward_${role} password ${client.escapeLiteral(passwords[role])}`);
     }
     const found = await client.query('select from pg_database where datname = $1', [name]);
-    if (found.rowCount === 0) await client.query(`create database ${client.escapeIdentifier(name)} owner rimeward_migrator`);
+    if (found.rowCount === 0)
+      await client.query(`create database ${client.escapeIdentifier(name)} owner rimeward_migrator`);
     await client.query(`revoke all on database ${client.escapeIdentifier(name)} from public`);
     await client.query(`grant connect on database ${client.escapeIdentifier(name)} to rimeward_app`);
   });
@@ -35,7 +39,9 @@ export async function prepareDatabase({ adminUrl, name, passwords }) {
 }
 
 export async function dropDatabase(adminUrl, name) {
-  await asAdmin(adminUrl, (client) => client.query(`drop database if exists ${client.escapeIdentifier(name)} with (force)`));
+  await asAdmin(adminUrl, (client) =>
+    client.query(`drop database if exists ${client.escapeIdentifier(name)} with (force)`),
+  );
 }
 
 async function asAdmin(adminUrl, work) {

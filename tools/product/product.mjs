@@ -14,7 +14,14 @@ const api = join(root, 'apps/api/dist');
  * The built product on a database of its own: migrated, seeded where asked, served. The API can be stopped and started again on
  * the same port, so that a test can take the office away and bring it back.
  */
-export async function startProduct({ adminUrl, dataDir, databaseName = 'rimeward', port, seedDemo = false, env = {} }) {
+export async function startProduct({
+  adminUrl,
+  dataDir,
+  databaseName = 'rimeward',
+  port,
+  seedDemo = false,
+  env = {},
+}) {
   mkdirSync(dataDir, { recursive: true });
   const secrets = readSecrets(dataDir);
   const photoDir = join(dataDir, 'photos');
@@ -56,7 +63,10 @@ export async function startProduct({ adminUrl, dataDir, databaseName = 'rimeward
       return child?.pid ?? null;
     },
     async startApi() {
-      const started = spawn(process.execPath, [join(api, 'main.js')], { env: environment, stdio: ['ignore', 'inherit', 'inherit'] });
+      const started = spawn(process.execPath, [join(api, 'main.js')], {
+        env: environment,
+        stdio: ['ignore', 'inherit', 'inherit'],
+      });
       child = started;
       started.once('exit', (code, signal) => {
         if (child === started) {
@@ -98,7 +108,8 @@ async function step(what, file, env) {
 
 async function answering(origin, child) {
   for (let tries = 0; tries < 300; tries += 1) {
-    if (child.exitCode !== null) throw new Fault('The API stopped while starting; its own message stands above.');
+    if (child.exitCode !== null)
+      throw new Fault('The API stopped while starting; its own message stands above.');
     try {
       const response = await fetch(`${origin}/api/health`, { signal: AbortSignal.timeout(2_000) });
       if (response.ok) return;

@@ -20,7 +20,8 @@ const planted = {
 
 const real = await cruise(['libs', 'apps']);
 const problems = [];
-if (real.modules < floor) problems.push(`Only ${real.modules} modules were read; at least ${floor} are expected.`);
+if (real.modules < floor)
+  problems.push(`Only ${real.modules} modules were read; at least ${floor} are expected.`);
 problems.push(...real.violations.map(({ rule, from, to }) => `${rule.name}: ${from} -> ${to}`));
 
 for (const [rule, [folder, line]] of Object.entries(planted)) {
@@ -31,7 +32,8 @@ for (const [rule, [folder, line]] of Object.entries(planted)) {
   writeFileSync(file, `${line.replace("'..", "'../..")}\n`);
   const found = await cruise([file]);
   rmSync(place, { recursive: true });
-  if (!found.violations.some((one) => one.rule.name === rule)) problems.push(`The planted import for "${rule}" was not found.`);
+  if (!found.violations.some((one) => one.rule.name === rule))
+    problems.push(`The planted import for "${rule}" was not found.`);
 }
 
 console.log(problems.length === 0 ? `${real.modules} modules read, every arrow holds.` : problems.join('\n'));

@@ -27,7 +27,8 @@ function suite(name, command, args, { reportFile, cwd = root, needs = [] }) {
       const report = join(folder, reportFile);
       const code = await runShown(command, args(report), { cwd, env });
       const counts = countsOf(report);
-      if (counts === null) return { passed: 0, failed: 1, output: `${name} wrote no report (exit code ${code}).` };
+      if (counts === null)
+        return { passed: 0, failed: 1, output: `${name} wrote no report (exit code ${code}).` };
       const failed = counts.failed + (code !== 0 && counts.failed === 0 ? 1 : 0);
       const output = failed > counts.failed ? `${name} ended with code ${code}.` : '';
       return { passed: counts.passed, failed, output };
@@ -44,7 +45,14 @@ function countsOf(report) {
   }
 }
 
-const vitest = (config) => (report) => ['run', '--config', config, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
+const vitest = (config) => (report) => [
+  'run',
+  '--config',
+  config,
+  '--reporter=default',
+  '--reporter=json',
+  `--outputFile.json=${report}`,
+];
 
 /** Everything `npm test` checks, in order; the fast ones are `npm run check`. */
 export const steps = [
@@ -58,7 +66,11 @@ export const steps = [
     fast: false,
     needs: ['postgres'],
     async run(env) {
-      const { code, output } = await runKept(process.execPath, ['--test', '--test-reporter=tap', 'tools/test/units/'], { cwd: root, env });
+      const { code, output } = await runKept(
+        process.execPath,
+        ['--test', '--test-reporter=tap', 'tools/test/units/'],
+        { cwd: root, env },
+      );
       const count = (word) => Number(new RegExp(`^# ${word} (\\d+)`, 'm').exec(output)?.[1] ?? 0);
       const failed = count('fail') || (code === 0 ? 0 : 1);
       return { passed: count('pass'), failed, output: failed > 0 ? output : '' };

@@ -64,7 +64,7 @@ export class PhoneBrowser {
   async close(): Promise<void> {
     await this.browser?.close().catch(() => undefined);
     await this.kill();
-    rmSync(this.profile, { recursive: true, force: true, maxRetries: 5 });
+    rmSync(this.profile, { recursive: true, force: true, maxRetries: 20, retryDelay: 250 });
   }
 }
 

@@ -72,6 +72,16 @@ describe('findings', () => {
     expect(idsIn(untilPlug, { atTheEnd: true })).toEqual(['plug-not-refitted', 'controller-still-on']);
   });
 
+  it('tell of zones in the order of their numbers, whatever the order on record', () => {
+    const shuffled = testSystem({ zones: [testZone(3), testZone(1), testZone(2)] });
+    const found = judge(
+      cleanVisit(shuffled).filter((line) => line.type !== 'end-sign-seen'),
+      { system: shuffled },
+    );
+    const numbers = found.map((one) => one.ruleId === 'end-sign-missing' && one.params.zoneNumber);
+    expect(numbers).toEqual([1, 2, 3]);
+  });
+
   it('never throw, name entries of the log only, and come worst first', () => {
     fc.assert(
       fc.property(visitLogs, fc.boolean(), (log, atTheEnd) => {

@@ -1,5 +1,6 @@
 /**
- * Order of stops against known optima: gap (limit 2 %) and time (limit 300 ms on one core), the worst of the seeds.
+ * Order of stops against known optima: gap (limit 2 %) and time (limit 300 ms of one core), the worst of the seeds. The
+ * limit holds for processor time, which other work on the machine does not lengthen much; the clock is printed beside it.
  * TSPLIB instances against their published optima; random uniform instances of 100 stops against the exact optimum
  * (exact-optima.py, integer program), and in this same run against a 1-tree bound and a long simulated annealing.
  * Needs the libs built (tsc -b). Exits 1 when a limit is broken.
@@ -39,32 +40,43 @@ function geo(nodes) {
   };
 }
 
-/** Worst length and worst time over the seeds. */
-function worst(costs) {
-  let length = 0;
-  let ms = 0;
-  for (const seed of seeds) {
-    const start = performance.now();
-    const tour = shortestTour(costs, { end: 'closed', random: seededRandom(seed) });
-    ms = Math.max(ms, performance.now() - start);
-    if (!tour.ok) throw new Error(JSON.stringify(tour.error));
-    length = Math.max(length, tour.value.length);
-  }
-  return { length, ms };
+/** Value of a call, the processor time it took (all threads of the process), and the time on the clock. */
+function timed(call) {
+  const start = performance.now();
+  const before = process.cpuUsage();
+  const result = call();
+  const { user, system } = process.cpuUsage(before);
+  if (!result.ok) throw new Error(JSON.stringify(result.error));
+  return { value: result.value, ms: (user + system) / 1000, clockMs: performance.now() - start };
 }
 
-function line(name, optimum, { length, ms }, more = '') {
+/** Worst length and worst times over the seeds. */
+function worst(costs) {
+  const runs = seeds.map((seed) =>
+    timed(() => shortestTour(costs, { end: 'closed', random: seededRandom(seed) })),
+  );
+  return { length: Math.max(...runs.map(({ value }) => value.length)), ...worstTimes(runs) };
+}
+
+const worstTimes = (runs) => ({
+  ms: Math.max(...runs.map(({ ms }) => ms)),
+  clockMs: Math.max(...runs.map(({ clockMs }) => clockMs)),
+});
+const times = ({ ms, clockMs }) => `${ms.toFixed(0).padStart(4)} ms (${clockMs.toFixed(0)} on the clock)`;
+
+function line(name, optimum, found, more = '') {
+  const { length, ms } = found;
   const gap = length / optimum - 1;
   const good = gap <= gapLimit && gap >= 0 && ms <= msLimit;
   if (!good) broken++;
   console.log(
     `${name.padEnd(14)} optimum ${String(optimum).padStart(6)}  worst ${String(length).padStart(6)}  ` +
-      `gap ${(gap * 100).toFixed(2).padStart(5)} %  ${ms.toFixed(0).padStart(4)} ms  ${good ? 'ok' : 'BROKEN'}${more}`,
+      `gap ${(gap * 100).toFixed(2).padStart(5)} %  ${times(found)}  ${good ? 'ok' : 'BROKEN'}${more}`,
   );
 }
 
 console.log(
-  `order of stops, worst of ${seeds.length} seeds; limits: gap 2 %, ${msLimit} ms (the first line includes warming up)`,
+  `order of stops, worst of ${seeds.length} seeds; limits: gap 2 %, ${msLimit} ms of processor time (the first line includes warming up)`,
 );
 const tsplib = [
   ['kroA100', 21282, plane],
@@ -99,16 +111,12 @@ for (let k = 1; k <= 5; k++) {
 }
 
 for (const count of [10, 25, 100]) {
-  let ms = 0;
-  for (const seed of seeds) {
-    const start = performance.now();
-    const day = orderStops(dayWithWindows(count, seededRandom(seed * 97)));
-    ms = Math.max(ms, performance.now() - start);
-    if (!day.ok) throw new Error(JSON.stringify(day.error));
-  }
-  if (ms > msLimit) broken++;
+  const found = worstTimes(
+    seeds.map((seed) => timed(() => orderStops(dayWithWindows(count, seededRandom(seed * 97))))),
+  );
+  if (found.ms > msLimit) broken++;
   console.log(
-    `${count} stops, half with windows: ${ms.toFixed(0)} ms at worst  ${ms <= msLimit ? 'ok' : 'BROKEN'}`,
+    `${count} stops, half with windows: ${times(found)} at worst  ${found.ms <= msLimit ? 'ok' : 'BROKEN'}`,
   );
 }
 process.exitCode = broken > 0 ? 1 : 0;

@@ -88,7 +88,7 @@ describe('signing in', () => {
       '401 {"type":"urn:rimeward:problem:sign-in-failed","title":"sign in failed","status":401,"code":"sign-in-failed"}',
     ]);
     expect(Math.abs(median(times.known) - median(times.unknown))).toBeLessThan(20);
-  });
+  }, 120_000);
 
   it('blocks an account after ten wrong passwords from changing addresses, but not its own browser', async () => {
     const person = company.people.supervisor;

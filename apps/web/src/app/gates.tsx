@@ -12,11 +12,15 @@ export function StartRedirect() {
   return <Navigate to={enrolment ? startOf(enrolment.user.role) : '/sign-in'} replace />;
 }
 
-/** The sign-in screen; whoever has signed in goes on to where he wanted to be. */
+/**
+ * The sign-in screen; whoever has signed in goes on to where he wanted to be. With `?again` it also opens for somebody whose
+ * session at the office has ended while his phone still knows him.
+ */
 export function SignedOutGate() {
   const { enrolment } = useSession();
-  const wanted = (useLocation().state as { wanted?: string } | null)?.wanted;
-  if (!enrolment) return <Outlet />;
+  const location = useLocation();
+  const wanted = (location.state as { wanted?: string } | null)?.wanted;
+  if (!enrolment || new URLSearchParams(location.search).has('again')) return <Outlet />;
   return <Navigate to={wanted ?? startOf(enrolment.user.role)} replace />;
 }
 

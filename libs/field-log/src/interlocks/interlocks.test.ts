@@ -77,6 +77,11 @@ describe('interlocks before air', () => {
     expect(unmet([...ready, line('part-protected', left)])).toEqual(['sensitive-parts']);
   });
 
+  it('hold air back for every single one that is not met', () => {
+    const types = ['water-off', 'pressure-relieved', 'part-protected', 'valve-set', 'regulator-set'] as const;
+    for (const type of types) expect([type, mayStartAir(locks(without(type)))]).toEqual([type, false]);
+  });
+
   it('can be passed with a reason where no person is at risk', () => {
     const passed = [
       ...without('pressure-relieved'),

@@ -3,8 +3,8 @@ import { describe, expect, it } from 'vitest';
 import { foldVisit } from '../fold/fold-visit';
 import { visitLogs } from '../testing/arbitraries';
 import { cleanVisit, line, written, type Line } from '../testing/clean-visit';
-import { testPump, testSystem } from '../testing/systems';
-import { visitSteps, type VisitStepId } from './visit-steps';
+import { testParts, testPump, testSystem } from '../testing/systems';
+import { visitSteps, zoneIsDone, type VisitStepId } from './visit-steps';
 
 const system = testSystem();
 const stepsOf = (lines: Line[], of = system) => visitSteps(foldVisit(written(lines)), of);
@@ -95,5 +95,38 @@ describe('steps of a visit', () => {
         }
       }),
     );
+  });
+
+  it('ask for the caution card beside clear people', () => {
+    expect(
+      statusOf('people-clear', [line('people-clear', { areaClear: true, eyesAndEars: true })])?.status,
+    ).toBe('todo');
+  });
+
+  it('take a part that was not found as looked for, and one found as open until it is protected', () => {
+    const looked = (outcome: 'found' | 'not-found') =>
+      statusOf('walk-through', [
+        line('part-looked-for', { partId: testParts.sensor, kind: 'flow-sensor', outcome }),
+      ])?.status;
+    expect([looked('found'), looked('not-found')]).toEqual(['todo', 'done']);
+  });
+
+  it.each([
+    [['mist'], false],
+    [['mist', 'spitting'], false],
+    [['spitting', 'mist'], true],
+    [['spitting', 'dry'], true],
+    [['water', 'water'], false],
+  ] as const)('count a zone with cycles that ended in %j as done: %s', (signs, done) => {
+    const zoneId = system.zones[0]?.id ?? '';
+    const lines = signs.flatMap((sign, index) => {
+      const cycleId = `00000000-0000-4000-8000-00000000002${index}`;
+      return [
+        line('air-started', { cycleId, zoneId, gaugePsi: null }),
+        line('air-stopped', { cycleId, elapsedMs: 60_000 }),
+        line('end-sign-seen', { cycleId, sign }),
+      ];
+    });
+    expect(zoneIsDone(foldVisit(written(lines)).zones[zoneId])).toBe(done);
   });
 });

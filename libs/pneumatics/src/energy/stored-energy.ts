@@ -37,7 +37,7 @@ export interface StoredEnergy extends Explained {
   cautions: typeof storedEnergyCautions;
 }
 
-/** Atmospheric pressure as the code rounds it, Pa. */
+/** Atmospheric pressure as the code rounds it, Pa; on a mountain the site's own, which gives more energy. */
 const codeAtmospherePa = 101_000;
 const jPerKgTnt = 4_266_920;
 const scaledFactor = 20;
@@ -59,8 +59,9 @@ export function storedEnergy(
   if (impossible) return impossible;
   const volumeM3 = volumeGal * m3PerGal;
   const gaugePa = pressurePsi * paPerPsi;
-  const totalPa = gaugePa + atmospherePsia * paPerPsi;
-  const energyJ = Math.max(0, 2.5 * totalPa * volumeM3 * (1 - (codeAtmospherePa / totalPa) ** 0.286));
+  const atmospherePa = Math.min(codeAtmospherePa, atmospherePsia * paPerPsi);
+  const totalPa = gaugePa + atmospherePa;
+  const energyJ = 2.5 * totalPa * volumeM3 * (1 - (atmospherePa / totalPa) ** 0.286);
   const tntKg = energyJ / jPerKgTnt;
   const scaledDistanceM = scaledFactor * Math.cbrt(2 * tntKg);
   const waterJ = (gaugePa * gaugePa * volumeM3) / (2 * waterBulkModulusPa);

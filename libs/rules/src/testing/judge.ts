@@ -44,9 +44,7 @@ export function before(type: Line['type'], added: readonly Line[], lines: readon
 
 /** A clean visit in which the bodies of a type are changed. */
 export function changed(type: Line['type'], body: object, lines: readonly Line[] = clean): Line[] {
-  return lines.map((line) =>
-    line.type === type ? ({ ...line, body: { ...line.body, ...body } }) : line,
-  );
+  return lines.map((line) => (line.type === type ? { ...line, body: { ...line.body, ...body } } : line));
 }
 
 /** A clean visit in which the lines of a type come last before leaving. */

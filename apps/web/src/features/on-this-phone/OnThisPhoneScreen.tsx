@@ -3,6 +3,7 @@ import Button from '@mui/material/Button';
 import Typography from '@mui/material/Typography';
 import { useLiveQuery } from 'dexie-react-hooks';
 import { useTranslation } from 'react-i18next';
+import { Link } from 'react-router-dom';
 import { useDates } from '../../app/i18n/use-dates';
 import { MainAction } from '../../components/MainAction';
 import { PhoneScreen } from '../../components/PhoneScreen';
@@ -30,6 +31,11 @@ export function OnThisPhoneScreen() {
       }
     >
       {status && <Summary status={status} />}
+      {status?.reason === 'sign-in' && (
+        <Button component={Link} to="/sign-in?again=/on-this-phone" variant="contained" fullWidth>
+          {t('signInAgain')}
+        </Button>
+      )}
       <Box component="ul" sx={{ listStyle: 'none', p: 0, m: 0 }}>
         {items.map((item) => (
           <OutboxRow key={item.id} item={item} />

@@ -5,6 +5,7 @@ const en = {
   since: 'Oldest since {{when}}',
   lastContact: 'Last contact with the office {{when}}',
   neverContact: 'No contact with the office yet',
+  signInAgain: 'Sign in again',
   deliverNow: 'Deliver now',
   delivering: 'Delivering',
   exportAll: 'Save a copy of this phone’s log',

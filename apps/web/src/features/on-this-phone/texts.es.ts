@@ -7,6 +7,7 @@ const es: OnThisPhoneTexts = {
   since: 'La más antigua desde {{when}}',
   lastContact: 'Último contacto con la oficina {{when}}',
   neverContact: 'Aún sin contacto con la oficina',
+  signInAgain: 'Entrar otra vez',
   deliverNow: 'Enviar ahora',
   delivering: 'Enviando',
   exportAll: 'Guardar una copia del registro de este teléfono',

@@ -21,7 +21,7 @@ export function HeldPanel() {
   return (
     <Box component="section">
       <Typography variant="h2">{t('held.title')}</Typography>
-      {held.isError && <AskAgain onAgain={() => void held.refetch()} />}
+      {held.isError && <AskAgain error={held.error} onAgain={() => void held.refetch()} />}
       {held.data && entries.length === 0 && <Typography>{t('held.none')}</Typography>}
       {entries.slice(0, 20).map((entry) => (
         <HeldLine key={entry.id} entry={entry} />

@@ -20,7 +20,7 @@ export function PhonesPanel() {
   return (
     <Box component="section">
       <Typography variant="h2">{t('phones.title')}</Typography>
-      {phones.isError && <AskAgain onAgain={() => void phones.refetch()} />}
+      {phones.isError && <AskAgain error={phones.error} onAgain={() => void phones.refetch()} />}
       {phones.data && waiting.length === 0 && <Typography>{t('phones.none')}</Typography>}
       {waiting.map((device) => (
         <PhoneLine key={device.id} device={device} />

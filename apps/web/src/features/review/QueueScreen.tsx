@@ -67,7 +67,7 @@ export function QueueScreen() {
           </Button>
           {keys && <Typography variant="body2">{t('queue.keys')}</Typography>}
         </Box>
-        {queue.isError && <AskAgain onAgain={() => void queue.refetch()} />}
+        {queue.isError && <AskAgain error={queue.error} onAgain={() => void queue.refetch()} />}
         {!queue.isPending && items.length === 0 && !queue.isError && (
           <Typography>{t('queue.empty')}</Typography>
         )}

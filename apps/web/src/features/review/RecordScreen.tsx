@@ -19,7 +19,7 @@ export function RecordScreen({ visitId }: { visitId: string }) {
   const { t } = useTranslation('review');
   const asked = useRecord(visitId);
   if (asked.isPending) return <Typography sx={{ p: 3 }}>{t('loading')}</Typography>;
-  if (!asked.open) return <AskAgain onAgain={() => void asked.refetch()} />;
+  if (!asked.open) return <AskAgain error={asked.error} onAgain={() => void asked.refetch()} />;
   return <Record open={asked.open} onAgain={() => void asked.refetch()} />;
 }
 

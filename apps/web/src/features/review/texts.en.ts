@@ -5,6 +5,7 @@ const en = {
   today: 'Phone view',
   loading: 'Asking the office',
   failed: 'The office did not answer.',
+  signIn: 'Sign in again',
   again: 'Ask again',
   queue: {
     total: '{{count}} visits',

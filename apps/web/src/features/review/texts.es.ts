@@ -7,6 +7,7 @@ const es: ReviewTexts = {
   today: 'Vista de teléfono',
   loading: 'Preguntando a la oficina',
   failed: 'La oficina no respondió.',
+  signIn: 'Entrar otra vez',
   again: 'Preguntar otra vez',
   queue: {
     total: '{{count}} visitas',

@@ -12,7 +12,7 @@ import { MainAction } from '../../components/MainAction';
 import { signIn, type SignInFault } from './session-api';
 
 /** Sign-in, in both languages from the first word on. A failed attempt keeps what was typed. */
-export function SignInScreen() {
+export function SignInScreen({ onDone }: { onDone: () => void }) {
   const { t, i18n } = useTranslation();
   const [fault, setFault] = useState<SignInFault | null>(null);
   const [shown, setShown] = useState(false);
@@ -22,7 +22,9 @@ export function SignInScreen() {
 
   const submit = form.handleSubmit(async ({ email, password }) => {
     setFault(null);
-    setFault(await signIn({ email: email.trim(), password }));
+    const found = await signIn({ email: email.trim(), password });
+    setFault(found);
+    if (found === null) onDone();
   });
 
   return (

@@ -65,6 +65,16 @@ checkRule('never-dry', {
 checkRule('end-sign-missing', {
   finds: { 'no sign written': () => judge(without({ type: 'end-sign-seen' })) },
   leaves: {
+    'skipped after all': () =>
+      judge(
+        before(
+          'left',
+          [skipped, line('zone-skipped', { zoneId: zoneTwo, reason: 'dog' })],
+          without({ type: 'end-sign-seen' }),
+        ),
+      ),
+    'a zone without any air': () =>
+      judge(without(inCycles(new Set([...zoneOneCycles, testId(2_021), testId(2_022)])))),
     'a sign in the last cycle alone': () =>
       judge(without((one) => one.type === 'end-sign-seen' && !inCycles(lastCycles)(one))),
   },
@@ -87,21 +97,28 @@ checkRule('cycle-too-long', {
 
 checkRule('air-unattended', {
   finds: { 'a quarter of an hour': () => judge(lasting(900_000)) },
-  leaves: { 'three minutes': () => judge(lasting(180_000)) },
+  leaves: {
+    'three minutes': () => judge(lasting(180_000)),
+    'ten minutes, the border itself': () => judge(lasting(600_000)),
+  },
   params: { ...first, seconds: 900 },
 });
 
 checkRule('rest-too-short', {
   finds: { 'half a minute': () => judge(before('air-closed-down', [...zoneAgain(0.5)])) },
-  leaves: { 'two minutes': () => judge(before('air-closed-down', [...zoneAgain(2)])) },
+  leaves: {
+    'two minutes': () => judge(before('air-closed-down', [...zoneAgain(2)])),
+    'a minute, the border itself': () => judge(before('air-closed-down', [...zoneAgain(1)])),
+  },
   params: { zoneNumber: 2, zoneName: 'Zone 2', seconds: 30, wantedSeconds: 60 },
 });
 
 /** Zone 2 ends the clean visit; its air goes on once more after a rest. */
 function zoneAgain(wait: number): Line[] {
-  return third('mist', wait).map(
-    (one) => ({ ...one, body: 'zoneId' in one.body ? { ...one.body, zoneId: zoneTwo } : one.body }),
-  );
+  return third('mist', wait).map((one) => ({
+    ...one,
+    body: 'zoneId' in one.body ? { ...one.body, zoneId: zoneTwo } : one.body,
+  }));
 }
 
 checkRule('air-after-dry', {
@@ -134,6 +151,12 @@ checkRule('air-against-water', {
   },
   leaves: {
     'about as much as called for': () => judge(clean, { plan }),
+    'half of it, the border itself': () =>
+      judge(clean, { plan: { ...plan, airSecondsByZone: { [zoneOne]: 240 } } }),
+    'six times as much, the border itself': () =>
+      judge(clean, { plan: { ...plan, airSecondsByZone: { [zoneOne]: 20 } } }),
+    'skipped in the end': () =>
+      judge(before('left', [skipped]), { plan: { ...plan, airSecondsByZone: { [zoneOne]: 900 } } }),
     'not worked out': () => judge(clean, { plan: { ...plan, airSecondsByZone: { [zoneOne]: null } } }),
   },
   params: { ...first, airSeconds: 120, expectedSeconds: 300, how: 'too-little' },

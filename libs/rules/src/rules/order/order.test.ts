@@ -1,6 +1,7 @@
 import { testId } from '@rimeward/field-log/testing';
 import type { LogEntry } from '@rimeward/field-log';
-import { line, written } from '@rimeward/field-log/testing/clean-visit';
+import { line, written, type Line } from '@rimeward/field-log/testing/clean-visit';
+import { describe, expect, it } from 'vitest';
 import { testParts, testPump, testSystem } from '@rimeward/field-log/testing/systems';
 import { before, changed, clean, judge, judgeLog, late, without } from '../../testing/judge';
 import { checkRule } from '../../testing/check-rule';
@@ -132,6 +133,10 @@ checkRule('air-with-backflow-open', {
   finds: {
     'shutoffs not recorded': () =>
       judge(without(({ body }) => 'stage' in body && body.stage === 'before-air')),
+    'one of two not recorded': () =>
+      judge(
+        without(({ body }) => 'stage' in body && body.stage === 'before-air' && body.valveId === 'shutoff-1'),
+      ),
     'a shutoff open': () =>
       judge(clean.map((one) => ('stage' in one.body && one.body.stage === 'before-air' ? openValve : one))),
   },
@@ -152,9 +157,20 @@ checkRule('no-zone-open', {
       const helper = written([closing], { device: testId(2), firstMinute: minuteOfFirstStop - 0.5 });
       return judgeLog([...log, ...helper]);
     },
+    'a zone shut, opened again, and closed under the next air': () => {
+      const added = [line('zone-opened', { zoneId }), line('zone-closed', { zoneId })];
+      return judge([
+        ...clean.slice(0, stopAt + 3),
+        ...added,
+        ...clean.slice(stopAt + 3, stopAt + 4),
+        line('zone-closed', { zoneId: testId(12) }),
+        ...clean.slice(stopAt + 4),
+      ]);
+    },
     'the only zone closed under air': () => judge(before('air-stopped', [line('zone-closed', { zoneId })])),
   },
   leaves: {
+    'nothing closed by hand': () => judge(clean),
     'the next zone opened before the last is closed': () =>
       judge(
         before('air-stopped', [line('zone-opened', { zoneId: testId(12) }), line('zone-closed', { zoneId })]),
@@ -223,7 +239,12 @@ checkRule('close-down-incomplete', {
   finds: {
     'hose never bled': () => judge(without(({ body }) => 'step' in body && body.step === 'hose-bled')),
   },
-  leaves: { 'still at work': () => judge(clean.slice(0, -9)) },
+  leaves: {
+    'still at work': () => judge(clean.slice(0, -9)),
+    'all three recorded': () => judge(clean),
+    'no air was given': () =>
+      judge(without(({ type }) => type === 'air-started' || type === 'air-closed-down')),
+  },
   params: { steps: 2 },
 });
 
@@ -239,4 +260,36 @@ checkRule('visit-cut-short', {
     'left as done': () => judge(clean, { system: testSystem({ pump: { id: testPump, place: '' } }) }),
   },
   params: { why: 'weather', zonesLeft: 2 },
+});
+
+describe('severity', () => {
+  const left = (kind: 'pump' | 'flow-sensor') =>
+    judge(changed('part-protected', { how: 'left', kind }, changed('part-looked-for', { kind })), {
+      system: testSystem({ sensitiveParts: [] }),
+    }).find((one) => one.ruleId === 'sensitive-part-left')?.severity;
+  const unknown = (outcome: 'found' | 'not-found') =>
+    judge(changed('part-looked-for', { outcome }, without({ type: 'part-protected' })))
+      .filter((one) => one.ruleId === 'sensitive-part-unknown')
+      .map((one) => [one.severity, one.params]);
+
+  it('of a pump in the way is a danger, of another part a fault', () => {
+    expect([left('pump'), left('flow-sensor')]).toEqual(['danger', 'fault']);
+  });
+
+  it('of a part that was found and not protected is a fault, of one that was not found a gap', () => {
+    expect(unknown('found')).toEqual([['fault', { part: 'flow-sensor', how: 'not-protected' }]]);
+    expect(unknown('not-found')).toEqual([['gap', { part: 'flow-sensor', how: 'not-found' }]]);
+  });
+});
+
+describe('a visit that was cut short', () => {
+  it('counts the zones that still hold water', () => {
+    const end = clean.findIndex((one) => one.type === 'air-closed-down');
+    const cut = line('left', { outcome: 'cut-short', why: 'weather', present: 'nobody-present' });
+    const zonesLeft = (lines: readonly Line[]) =>
+      judge([...lines, cut]).map((one) => one.ruleId === 'visit-cut-short' && one.params.zonesLeft);
+    expect(zonesLeft(clean.slice(0, end))).toEqual([0]);
+    expect(zonesLeft(clean.slice(0, end - 3))).toEqual([1]);
+    expect(zonesLeft(changed('end-sign-seen', { sign: 'dry' }, clean.slice(0, end)))).toEqual([0]);
+  });
 });

@@ -1,3 +1,4 @@
+import { describe, expect, it } from 'vitest';
 import { testId } from '@rimeward/field-log/testing';
 import { line } from '@rimeward/field-log/testing/clean-visit';
 import { testSystem, testZone } from '@rimeward/field-log/testing/systems';
@@ -61,6 +62,8 @@ checkRule('regulator-over-ceiling', {
   leaves: {
     'set high, and lowered before the air': () =>
       judge(before('regulator-set', [line('regulator-set', { pressurePsi: 120 })])),
+    'set half a division over the ceiling': () =>
+      judge(changed('regulator-set', { pressurePsi: 51 }), { system: mixed }),
     'raised after the last air': () => judge(before('left', [line('regulator-set', { pressurePsi: 120 })])),
   },
   params: { ...first, pressurePsi: 60, ceilingPsi: 50, setBy: 'polyethylene' },
@@ -99,4 +102,16 @@ checkRule('no-gauge-reading', {
       ),
   },
   params: first,
+});
+
+describe('a regulator over several ceilings', () => {
+  it('is told once, for the zone with the lowest one', () => {
+    const lower = {
+      ...mixed,
+      zones: [testZone(1), ...mixed.zones.slice(0, 1).map((one) => ({ ...one, id: testId(12), number: 2 }))],
+    };
+    const found = judge(changed('regulator-set', { pressurePsi: 90 }), { system: lower });
+    const told = found.filter((one) => one.ruleId === 'regulator-over-ceiling');
+    expect(told.map((one) => one.params)).toMatchObject([{ zoneNumber: 2, ceilingPsi: 50 }]);
+  });
 });

@@ -1,3 +1,4 @@
+import { describe, expect, it } from 'vitest';
 import type { LogEntry } from '@rimeward/field-log';
 import { entry, testId } from '@rimeward/field-log/testing';
 import { people, written } from '@rimeward/field-log/testing/clean-visit';
@@ -59,6 +60,7 @@ const stay = (fromMinute: number, toMinute: number, actor: string = people.lead)
 checkRule('two-places-at-once', {
   finds: { 'half an hour elsewhere in between': () => judge(clean, stay(5, 35)) },
   leaves: {
+    'ten minutes of overlap, the border itself': () => judge(clean, stay(-60, 11)),
     'elsewhere before': () => judge(clean, stay(-60, 5)),
     'somebody else': () => judge(clean, stay(5, 35, testId(902))),
     'an answer written later from elsewhere': () => {
@@ -73,6 +75,8 @@ checkRule('visit-shorter-than-air', {
   finds: { 'an hour of air in a short visit': () => judge(changed('air-stopped', { elapsedMs: 3_600_000 })) },
   leaves: {
     'as long as it took': () => judge(clean),
+    'a minute more than there was, by late thumbs': () =>
+      judge(changed('air-stopped', { elapsedMs: (minutesOfVisit() + 1) * 15_000 })),
     'not left yet': () => judge(changed('air-stopped', { elapsedMs: 3_600_000 }).slice(0, -1)),
   },
   params: { visitSeconds: minutesOfVisit() * 60, airSeconds: 4 * 3_600 },
@@ -97,4 +101,15 @@ checkRule('chain-broken', {
   },
   leaves: { 'an unbroken chain': () => judge(before('left', []), { context: { brokenChains: [] } }) },
   params: { device, seq: 2 },
+});
+
+describe('a gap of a phone', () => {
+  it('rests on the first entry of that phone after it', () => {
+    const helper = written([line('note-written', { text: 'helper' })], {
+      device: testId(2),
+      firstMinute: 90,
+    });
+    const found = judgeLog([...log, ...helper], gap(device)).find((one) => one.ruleId === 'device-gap');
+    expect(found?.entryIds).toEqual([log.find((one) => one.seq === 5)?.id]);
+  });
 });

@@ -5,7 +5,7 @@ import { checkRule } from '../../testing/check-rule';
 
 const inWinter = ({ body }: Line) => 'stage' in body && body.stage === 'winter';
 const winter = (change: object) =>
-  clean.map((one) => (inWinter(one) ? ({ ...one, body: { ...one.body, ...change } }) : one));
+  clean.map((one) => (inWinter(one) ? { ...one, body: { ...one.body, ...change } } : one));
 const pumped = { system: testSystem({ pump: { id: testPump, place: 'Pump house' } }) };
 const drain = (position: 'open' | 'closed', ranDry: boolean) =>
   line('drain-set', { drainId: testDrains.upstream, position, ranDry });

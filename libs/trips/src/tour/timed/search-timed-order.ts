@@ -4,7 +4,7 @@ import { TimedImprover } from './timed-improver';
 import { weighOrder, type TimedDay } from './timed-day';
 
 /** Stops driven to, in thought, before the search ends: about a tenth of a second on a small machine. */
-const usualBudget = 4_000_000;
+const usualBudget = 2_500_000;
 const longestShake = 10;
 
 /**

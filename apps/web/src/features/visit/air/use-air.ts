@@ -32,20 +32,20 @@ export interface Air {
 export function useAir(zone: Zone, nowMs: number): Air {
   const { state, system, ceilings, save } = useVisitLog();
   const mark = useRef<CycleMark | null>(null);
-  const busy = useRef(false);
+  const busy = useRef(new Set<string>());
   const cycles = state.zones[zone.id]?.cycles ?? [];
   const running = cycles.find((cycle) => !cycle.stopped) ?? null;
   const last = cycles.at(-1) ?? null;
   const unsigned = last && last.stopped && !last.endSign ? last : null;
 
-  /** Ten taps are one: the second waits for the first to be written. */
-  async function once(work: () => Promise<unknown>): Promise<void> {
-    if (busy.current) return;
-    busy.current = true;
+  /** Ten taps on one control are one; another control does not wait for it. */
+  async function once(action: string, work: () => Promise<unknown>): Promise<void> {
+    if (busy.current.has(action)) return;
+    busy.current.add(action);
     try {
       await work();
     } finally {
-      busy.current = false;
+      busy.current.delete(action);
     }
   }
 
@@ -59,22 +59,26 @@ export function useAir(zone: Zone, nowMs: number): Air {
     }),
     alarms: airAlarms(state, nowMs, { [zone.id]: capMs(zone.headKind) }),
     start: () =>
-      once(async () => {
+      once('start', async () => {
+        // The entry of a start just tapped may be saved and not yet on the screen.
+        const unseen = mark.current && !cycles.some((cycle) => cycle.cycleId === mark.current?.cycleId);
+        if (running || unseen) return;
         const cycleId = uuidv7();
         const started = { cycleId, steadyMs: performance.now(), wallMs: Date.now() };
         const gaugePsi = state.regulator?.pressurePsi ?? null;
         if (await save('air-started', { cycleId, zoneId: zone.id, gaugePsi })) mark.current = started;
       }),
     stop: () =>
-      once(async () => {
+      once('stop', async () => {
         if (!running) return;
         const now = { steadyMs: performance.now(), wallMs: Date.now() };
         const elapsedMs = elapsedBySteadyClock(mark.current, running.cycleId, now);
         await save('air-stopped', { cycleId: running.cycleId, elapsedMs });
       }),
-    sign: (sign) => once(async () => unsigned && save('end-sign-seen', { cycleId: unsigned.cycleId, sign })),
+    sign: (sign) =>
+      once('sign', async () => unsigned && save('end-sign-seen', { cycleId: unsigned.cycleId, sign })),
     readGauge: (pressurePsi) =>
-      once(() => save('gauge-read', { cycleId: (running ?? last)?.cycleId ?? null, pressurePsi })),
+      once('gauge', () => save('gauge-read', { cycleId: (running ?? last)?.cycleId ?? null, pressurePsi })),
     skip: (reason) => save('zone-skipped', { zoneId: zone.id, reason }),
     pass: (interlock, reason) => save('interlock-passed', { interlock, reason }),
   };
