@@ -3,8 +3,6 @@ import { database } from './database/database';
 import type { Intent } from './database/schema';
 import { activeEnrolment } from './device/enrolment';
 
-export type { Intent } from './database/schema';
-
 /** Remembers for which field the camera is opened: the page may be killed before the picture comes back. */
 export async function openIntent(intent: {
   visit: string;

@@ -19,11 +19,6 @@ export function queuePreview(sha256: string, bytes: ArrayBuffer, type: PhotoType
   queue = queue.then(() => makePreview(sha256, bytes, type));
 }
 
-/** Settles when every preview asked for so far has been made or given up. */
-export function previewsDone(): Promise<void> {
-  return queue;
-}
-
 async function makePreview(sha256: string, bytes: ArrayBuffer, type: PhotoType): Promise<void> {
   try {
     const db = database();

@@ -13,7 +13,7 @@ import { lockOnSignOut, unsentWork } from '../device/sign-out';
 import { siteAccess } from '../queries/access';
 import { entriesOfVisit, reviewsOfVisit, unreadableOfVisit } from '../queries/entries';
 import { openQuestions } from '../queries/open-questions';
-import { visitDocument, visitsForDay } from '../queries/visits';
+import { visitDays, visitDocument, visitsForDay } from '../queries/visits';
 import { saveEntry } from '../save/save-entry';
 import { freshDatabase } from '../testing/fresh-database';
 import { Office } from '../testing/office';
@@ -85,6 +85,7 @@ describe('what was pulled', () => {
     });
     await runRound(ports(), freshMemory());
     expect((await visitsForDay('2026-10-15')).map(({ sequence }) => sequence)).toEqual([1, 2]);
+    expect(await visitDays()).toEqual(['2026-10-15', '2026-10-16']);
     expect((await entriesOfVisit(visitId)).length).toBe(2);
     expect(await unreadableOfVisit(visitId)).toBe(1);
   });
