@@ -38,6 +38,8 @@ export async function startCluster({ dataDir, superPassword, durable = true }) {
     stdio: ['ignore', 'ignore', 'pipe'],
     detached: true,
   });
+  // It has a session of its own, so whatever ends us has to end it.
+  process.once('exit', () => child.kill('SIGINT'));
   let told = '';
   child.stderr.on('data', (part) => (told = (told + part).slice(-4_000)));
   await ready(bin, port, child, () => told);

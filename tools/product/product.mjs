@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process';
-import { existsSync, mkdirSync, readFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { freePort } from '../lib/ports.mjs';
 import { root } from '../lib/paths.mjs';
@@ -7,8 +7,10 @@ import { runKept, stopChild } from '../lib/processes.mjs';
 import { Fault } from '../lib/say.mjs';
 import { readSecrets } from '../lib/secrets.mjs';
 import { dropDatabase, prepareDatabase } from '../postgres/database.mjs';
+import { apiPidFile } from './leftover.mjs';
 
 const api = join(root, 'apps/api/dist');
+export const apiScript = join(api, 'main.js');
 
 /**
  * The built product on a database of its own: migrated, seeded where asked, served. The API can be stopped and started again on
@@ -63,11 +65,12 @@ export async function startProduct({
       return child?.pid ?? null;
     },
     async startApi() {
-      const started = spawn(process.execPath, [join(api, 'main.js')], {
+      const started = spawn(process.execPath, [apiScript], {
         env: environment,
         stdio: ['ignore', 'inherit', 'inherit'],
       });
       child = started;
+      writeFileSync(apiPidFile(dataDir), String(started.pid));
       started.once('exit', (code, signal) => {
         if (child === started) {
           child = null;
