@@ -4,6 +4,7 @@ import { User } from '../../src/users/entities/user.entity';
 import { Visit } from '../../src/visits/entities/visit.entity';
 import { rowsOf, withClient } from '../support/admin';
 import { addCompany, addVisit, type TestCompany, type TestVisit } from '../support/company';
+import { TestBrowser } from '../support/browser';
 import { createTestApp, type TestApp } from '../support/test-app';
 
 /** Calls of the long race; the attack list asks for 100,000, which `RACE_CALLS` runs. */
@@ -17,7 +18,7 @@ describe('companies in one database', () => {
   let visitOfB: TestVisit;
 
   beforeAll(async () => {
-    test = await createTestApp({ DATABASE_POOL: '2' });
+    test = await createTestApp({ DATABASE_POOL: '2', REQUEST_LIMIT: '100000' });
     context = test.app.get(CompanyContext);
     a = await addCompany(test.database, 'Aspen');
     b = await addCompany(test.database, 'Birch');
@@ -147,4 +148,39 @@ describe('companies in one database', () => {
     ).length;
     expect(faults).toBe(expected);
   }, 600_000);
+
+  it('never mix over HTTP either, while many requests are given up half-way', async () => {
+    const sides = [
+      { own: 'Aspen', other: 'Birch', browser: await TestBrowser.of(test, a.people.owner) },
+      { own: 'Birch', other: 'Aspen', browser: await TestBrowser.of(test, b.people.owner) },
+    ];
+    const paths = [
+      '/api/visits?from=2026-01-01&to=2026-12-31',
+      '/api/company',
+      '/api/sites',
+      '/api/sync/pull',
+    ];
+    let answered = 0;
+    const ask = async (n: number): Promise<void> => {
+      const side = sides[n % 2] ?? sides[0];
+      const path = paths[n % paths.length] ?? '/api/company';
+      if (!side) return;
+      const cookie = [...side.browser.cookies].map(([name, value]) => `${name}=${value}`).join('; ');
+      const givesUp = n % 5 === 0 ? { signal: AbortSignal.timeout(5 + (n % 40)) } : {};
+      const answer = await fetch(`${test.url}${path}`, { headers: { cookie }, ...givesUp }).catch(() => null);
+      const text = await answer?.text().catch(() => null);
+      if (!text) return;
+      answered += 1;
+      expect([path, answer?.status, text.includes(side.own), text.includes(side.other)]).toEqual([
+        path,
+        200,
+        true,
+        false,
+      ]);
+    };
+    for (let begun = 0; begun < 600; begun += 200) {
+      await Promise.all(Array.from({ length: 200 }, (_, index) => ask(begun + index)));
+    }
+    expect(answered).toBeGreaterThan(400);
+  }, 120_000);
 });
