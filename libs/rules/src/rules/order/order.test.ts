@@ -160,11 +160,11 @@ checkRule('no-zone-open', {
     'a zone shut, opened again, and closed under the next air': () => {
       const added = [line('zone-opened', { zoneId }), line('zone-closed', { zoneId })];
       return judge([
-        ...clean.slice(0, stopAt + 3),
+        ...clean.slice(0, stopAt + 2),
         ...added,
-        ...clean.slice(stopAt + 3, stopAt + 4),
+        ...clean.slice(stopAt + 2, stopAt + 3),
         line('zone-closed', { zoneId: testId(12) }),
-        ...clean.slice(stopAt + 4),
+        ...clean.slice(stopAt + 3),
       ]);
     },
     'the only zone closed under air': () => judge(before('air-stopped', [line('zone-closed', { zoneId })])),
@@ -287,7 +287,9 @@ describe('a visit that was cut short', () => {
     const end = clean.findIndex((one) => one.type === 'air-closed-down');
     const cut = line('left', { outcome: 'cut-short', why: 'weather', present: 'nobody-present' });
     const zonesLeft = (lines: readonly Line[]) =>
-      judge([...lines, cut]).map((one) => one.ruleId === 'visit-cut-short' && one.params.zonesLeft);
+      judge([...lines, cut]).flatMap((one) =>
+        one.ruleId === 'visit-cut-short' ? [one.params.zonesLeft] : [],
+      );
     expect(zonesLeft(clean.slice(0, end))).toEqual([0]);
     expect(zonesLeft(clean.slice(0, end - 3))).toEqual([1]);
     expect(zonesLeft(changed('end-sign-seen', { sign: 'dry' }, clean.slice(0, end)))).toEqual([0]);
