@@ -1,3 +1,4 @@
+import { randomBytes } from 'node:crypto';
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
@@ -15,7 +16,12 @@ export async function openOffice(name: string): Promise<Office> {
   if (!adminUrl)
     throw new Error('TEST_POSTGRES_ADMIN_URL is not set: run the browser tests with "npm test -- browser"');
   const dataDir = mkdtempSync(join(process.env['TEST_WORK_DIR'] ?? tmpdir(), 'office-'));
-  const product = await startProduct({ adminUrl, dataDir, databaseName: `browser_${name}`, seedDemo: true });
+  const product = await startProduct({
+    adminUrl,
+    dataDir,
+    databaseName: `browser_${name}_${randomBytes(4).toString('hex')}`,
+    seedDemo: true,
+  });
   return {
     product,
     account: (person) => {

@@ -28,7 +28,7 @@ export class HeldService {
     private readonly projections: ProjectionService,
   ) {}
 
-  /** Oldest first, those that nobody has settled before the settled ones; the newest 1,000 of them at most. */
+  /** Those that nobody has settled before the settled ones, each oldest first; 1,000 of them at most. */
   async list(companyId: string): Promise<HeldResponse> {
     const rows = await this.context.run(companyId, (manager) =>
       manager.query<HeldRow[]>(

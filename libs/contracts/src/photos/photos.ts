@@ -38,7 +38,6 @@ export type AnnounceResponse = z.infer<typeof announceResponseSchema>;
 export const photoFields = { part: 'part', preview: 'preview' } as const;
 
 /** POST /api/photos/:sha256/complete: the parts are joined, hashed, synced to disk and renamed; then it counts as proof. */
-export const completeResponseSchema = photoStateSchema;
 export type PhotoState = z.infer<typeof photoStateSchema>;
 
 /** What the office knows of a photograph: facts read from the file are facts about the file, not proof of place. */

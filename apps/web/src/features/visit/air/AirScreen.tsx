@@ -17,6 +17,7 @@ import { InterlockList } from './InterlockList';
 import { SkipZone } from './SkipZone';
 import { useAir } from './use-air';
 import { useAwake } from './use-awake';
+import { useNoUpdates } from '../log/use-no-updates';
 import { useNow } from './use-now';
 import { useSignal } from './use-signal';
 import { ZonePicker } from './ZonePicker';
@@ -70,6 +71,7 @@ function ZoneAir({ zone, order, onChoose, onDone }: ZoneAirProps) {
   const gauge =
     (running ?? air.cycles.at(-1))?.gaugeReadings.at(-1)?.pressurePsi ?? state.regulator?.pressurePsi ?? null;
   useAwake(running !== null);
+  useNoUpdates(running !== null);
   useSignal(alarm !== null, 880);
   useSignal(running !== null && ranMs >= capMs(zone.headKind) - 15_000, 660);
 

@@ -6,6 +6,7 @@ import { closeIntent, openIntent } from '../../../phone/intents';
 import { storePhoto, type PhotoFault } from '../../../phone/photos/intake';
 import { positionNow } from '../../../phone/photos/position';
 import { readPhoto } from '../../../phone/photos/read-photo';
+import { useNoUpdates } from './use-no-updates';
 import { useVisitLog } from './visit-log';
 
 interface Props {
@@ -23,6 +24,7 @@ export function VisitPhotos({ field, role, label, photos, onChange }: Props) {
   const { visit } = useVisitLog();
   const [fault, setFault] = useState<PhotoFault | null>(null);
   const [busy, setBusy] = useState(false);
+  useNoUpdates(busy);
 
   async function take(files: File[], source: 'camera' | 'gallery'): Promise<void> {
     setBusy(true);
