@@ -51,7 +51,8 @@ export function orificeUpstreamPa(
   if (chokedPa >= edgePa) return chokedPa;
   let lowPa = downstreamPa;
   let highPa = edgePa;
-  while (highPa - lowPa > 1e-6 * downstreamPa) {
+  // Two hundred halvings are far more than the tolerance needs; past them the figures are not finite.
+  for (let step = 0; step < 200 && highPa - lowPa > 1e-6 * downstreamPa; step += 1) {
     const middlePa = (lowPa + highPa) / 2;
     if (orificeFlowKgS(areaM2, middlePa, downstreamPa, upstreamK) < flowKgS) lowPa = middlePa;
     else highPa = middlePa;

@@ -43,7 +43,7 @@ export function pressureCeiling(input: CeilingInput): Result<PressureCeiling> {
   for (const run of runs) {
     const rated = ratedPsiOf(run);
     if (!rated.ok) return rated;
-    const rating = ratingCandidate(run, rated.value, airTemperatureF);
+    const rating = ratingCandidate(run, rated.value, airTemperatureF, ceilingPolicies[policyId].unknownPsi);
     if (rating) candidates.push(rating);
   }
   for (const { name, ratedPsi } of parts) {
@@ -73,10 +73,11 @@ function ratingCandidate(
   run: PipeRun,
   ratedPsi: number | null,
   airTemperatureF: number | null,
+  unknownPsi: number,
 ): CeilingCandidate | null {
   if (ratedPsi === null) {
     const tooHot = run.material === 'unknown' && deratedPsi(run, 1, airTemperatureF) === 0;
-    return tooHot ? ofRun(run, 0, Infinity) : null;
+    return tooHot ? ofRun(run, 0, unknownPsi) : null;
   }
   return ofRun(run, deratedPsi(run, ratedPsi, airTemperatureF), deratedPsi(run, ratedPsi, null));
 }

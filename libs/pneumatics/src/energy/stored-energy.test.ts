@@ -33,7 +33,7 @@ describe('stored energy', () => {
     expect(energy.scaledDistanceFt * mPerFt).toBeCloseTo(11.863, 3);
     expect(energy.testDistanceFt).toBeCloseTo(98.43, 2);
   });
-  it('in US units the code writes 360 Pt V and 1 488 617 ft-lb a pound of TNT: within 0.5 % and 5 % (the code's own two units differ so much; ASME PCC-2-2008 II-4, II-5, published)', () => {
+  it('in US units the code writes 360 Pt V and 1 488 617 ft-lb a pound of TNT: within 0.5 % and 5 % (its own two sets of units differ so much; ASME PCC-2-2008 II-4, II-5, published)', () => {
     const energy = inPipe(2.067, 1000, 80);
     const totalPsia = 80 + seaLevelPsia;
     const volumeFt3 = (energy.volumeGal * 231) / 1728;

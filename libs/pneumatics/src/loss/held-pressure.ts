@@ -66,7 +66,7 @@ export function heldPressure(input: HeldPressureInput, around: AirAround): Resul
   const mostPa = sourcePa(mostKgS);
   const byCompressor = mostPa <= regulatorPa;
   const flowKgS = byCompressor ? mostKgS : flowFor(sourcePa, regulatorPa, mostKgS, mostPa, atmospherePa);
-  const gaugePsi = ((byCompressor ? mostPa : regulatorPa) - atmospherePa) / paPerPsi;
+  const gaugePsi = byCompressor ? (mostPa - atmospherePa) / paPerPsi : regulatorPsi;
   const headPsi = (headPa(flowKgS) - atmospherePa) / paPerPsi;
   const pathLossPsi = gaugePsi - headPsi;
   return success({

@@ -26,11 +26,14 @@ export function frictionNumber(bore: Bore, flowKgS: number, temperatureK: number
 const dynamicPa2 = (bore: Bore, flowKgS: number, temperatureK: number): number =>
   (flowKgS / areaM2(bore)) ** 2 * airGasConstantJPerKgK * temperatureK;
 
+/** Newton's method; started beyond the isothermal limit, where the function rises and bends upwards. */
 function inletFromOutletPa(outletPa: number, pushPa2: number, friction: number): number {
-  let inletPa = Math.sqrt(outletPa * outletPa + pushPa2 * friction);
-  for (let step = 0; step < 12; step += 1) {
-    const nextPa = Math.sqrt(outletPa * outletPa + pushPa2 * (friction + 2 * Math.log(inletPa / outletPa)));
-    if (Math.abs(nextPa - inletPa) < 1e-9 * inletPa) return nextPa;
+  let inletPa = Math.max(Math.sqrt(outletPa * outletPa + pushPa2 * friction), 1.001 * Math.sqrt(pushPa2));
+  for (let step = 0; step < 40; step += 1) {
+    const short =
+      outletPa * outletPa + pushPa2 * (friction + 2 * Math.log(inletPa / outletPa)) - inletPa * inletPa;
+    const nextPa = inletPa + short / (2 * inletPa - (2 * pushPa2) / inletPa);
+    if (Math.abs(nextPa - inletPa) < 1e-10 * nextPa) return nextPa;
     inletPa = nextPa;
   }
   return inletPa;

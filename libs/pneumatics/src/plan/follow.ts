@@ -1,7 +1,7 @@
 import type { Result } from '@rimeward/units';
 
 /** A result made from another where there is one; the first failure otherwise. */
-export const then = <A, B>(first: Result<A>, next: (value: A) => Result<B>): Result<B> =>
+export const follow = <A, B>(first: Result<A>, next: (value: A) => Result<B>): Result<B> =>
   first.ok ? next(first.value) : first;
 
 /** A result made from two. */

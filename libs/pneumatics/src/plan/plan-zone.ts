@@ -10,7 +10,7 @@ import { hoseCooling, hoseEndF } from '../temperature/hose-cooling';
 import { hottestWithoutLowering } from '../temperature/wanted-temperature';
 import type { PlanInput, ZoneInput } from './plan-input';
 import { siteAir, type SiteAir } from './site-air';
-import { both, then } from './then';
+import { both, follow } from './follow';
 import { headsWater, zoneFit, zoneHeld, zoneHoseLoss, zonePushed } from './zone-air';
 import { airInHose, zoneDischarge } from './zone-heat';
 import type { ZonePlan } from './zone-plan';
@@ -47,17 +47,19 @@ export function planZoneIn(input: PlanInput, air: SiteAir, zone: ZoneInput, clea
       heatTransferWM2K: hose.heatTransferWM2K,
     }),
   );
-  const plan = then(ceiling, (limit) => success(planPressure(limit)));
+  const plan = follow(ceiling, (limit) => success(planPressure(limit)));
 
   const heads = headsWater(zone);
   const displacement = both(plan, around, (planPsi, { atmospherePsia }) =>
     zone.flowGpm === null ? needs('flowGpm') : displacementAir(zone.flowGpm, planPsi, atmospherePsia),
   );
   const openHeads = both(plan, around, (planPsi, site) =>
-    then(heads, ({ flowGpm, designPressurePsi }) => openHeadsAir(flowGpm, designPressurePsi, planPsi, site)),
+    follow(heads, ({ flowGpm, designPressurePsi }) =>
+      openHeadsAir(flowGpm, designPressurePsi, planPsi, site),
+    ),
   );
-  const held = then(plan, (planPsi) => zoneHeld(input, air, heads, path, planPsi));
-  const pushed = then(plan, (planPsi) => zonePushed(air, zone, planPsi));
+  const held = follow(plan, (planPsi) => zoneHeld(input, air, heads, path, planPsi));
+  const pushed = follow(plan, (planPsi) => zonePushed(air, zone, planPsi));
   const water = waterHeld(clearsMain ? path : zone.laterals);
   return {
     zoneId: zone.id,
@@ -81,9 +83,9 @@ export function planZoneIn(input: PlanInput, air: SiteAir, zone: ZoneInput, clea
         restSeconds: company.restSeconds,
       }),
     ),
-    fit: then(plan, (planPsi) => zoneFit(input, air, zone, planPsi, { displacement, pushed, held })),
+    fit: follow(plan, (planPsi) => zoneFit(input, air, zone, planPsi, { displacement, pushed, held })),
     energy: both(plan, around, (planPsi, { atmospherePsia }) =>
-      then(clearsMain ? water : waterHeld(path), ({ totalGal }) =>
+      follow(clearsMain ? water : waterHeld(path), ({ totalGal }) =>
         storedEnergy(totalGal, planPsi, atmospherePsia),
       ),
     ),

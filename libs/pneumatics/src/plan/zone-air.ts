@@ -10,7 +10,7 @@ import { hoseLoss, type HoseLoss } from '../loss/hose-loss';
 import type { PipeRun } from '../pipe/pipe-run';
 import type { PlanInput, ZoneInput } from './plan-input';
 import type { SiteAir } from './site-air';
-import { both, then } from './then';
+import { both, follow } from './follow';
 
 /** Flow and pressure of a zone's water, or what of it is missing. */
 export interface HeadsWater {
@@ -87,7 +87,7 @@ export function zoneFit(
 ): Result<CompressorFit> {
   const held = figures.held.ok ? figures.held.value : null;
   return both(figures.displacement, figures.pushed, ({ freeAirCfm: neededCfm }, { liftPsi }) =>
-    then(delivery, ({ freeAirCfm: deliveredCfm }) =>
+    follow(delivery, ({ freeAirCfm: deliveredCfm }) =>
       success(
         compressorFit(
           {

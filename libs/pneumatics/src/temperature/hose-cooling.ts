@@ -14,7 +14,8 @@ export interface HoseCooling extends Explained {
   connectionF: number;
   /** Length of this hose at which the air would be at the wanted temperature, ft; null where it never gets there. */
   enoughFt: number | null;
-  wantedF: number;
+  /** Null where nothing on the way minds heat. */
+  wantedF: number | null;
 }
 
 /** What cools and by how much. */
@@ -27,9 +28,9 @@ export interface HoseAir {
   heatTransferWM2K?: number;
 }
 
-/** With the temperature that would be low enough, F. */
+/** With the temperature that would be low enough, F; null where any is. */
 export interface HoseCoolingInput extends HoseAir {
-  wantedF: number;
+  wantedF: number | null;
 }
 
 const outsideIn = (hose: Hose): number => hose.outsideDiameterIn ?? hose.insideDiameterIn + hoseWallsIn;
@@ -59,7 +60,10 @@ export function hoseCooling(input: HoseCoolingInput): Result<HoseCooling> {
   if (impossible) return impossible;
   return success({
     connectionF: hoseEndF(input),
-    enoughFt: enoughFt(enteringF - airTemperatureF, wantedF - airTemperatureF, coolingPerM(input)),
+    enoughFt:
+      wantedF === null
+        ? 0
+        : enoughFt(enteringF - airTemperatureF, wantedF - airTemperatureF, coolingPerM(input)),
     wantedF,
     why: explain(
       'hose-cooling',

@@ -4,10 +4,10 @@ import { ratedPsiOf, surgeFactor } from '../pipe/rating';
 import { hottestForFactor } from '../pipe/temperature-factor';
 
 /**
- * The hottest air that does not lower a ceiling, F: at it every run's derated rating still reaches `ceilingPsi`. Infinity where no run minds
+ * The hottest air that does not lower a ceiling, F: at it every run's derated rating still reaches `ceilingPsi`. null where no run minds
  * heat; 73 F where a run's cold rating is itself the limit.
  */
-export function hottestWithoutLowering(runs: readonly PipeRun[], ceilingPsi: number): number {
+export function hottestWithoutLowering(runs: readonly PipeRun[], ceilingPsi: number): number | null {
   let hottestF = Infinity;
   for (const run of runs) {
     const rated = ratedPsiOf(run);
@@ -18,5 +18,5 @@ export function hottestWithoutLowering(runs: readonly PipeRun[], ceilingPsi: num
     const factor = ratedPsi === null ? 0 : Math.min(1, ceilingPsi / (ratedPsi * surgeFactor));
     hottestF = Math.min(hottestF, hottestForFactor(family, factor, run.nominalIn));
   }
-  return hottestF;
+  return hottestF === Infinity ? null : hottestF;
 }
