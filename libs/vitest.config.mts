@@ -9,5 +9,7 @@ export default defineConfig({
     root: import.meta.dirname,
     include: ['*/src/**/*.test.ts'],
     environment: 'node',
+    // Loaded machines are slow; what hangs still ends.
+    testTimeout: 60_000,
   },
 });

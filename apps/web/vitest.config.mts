@@ -9,6 +9,8 @@ export default defineConfig({
     root: import.meta.dirname,
     include: ['src/**/*.test.ts', 'src/**/*.test.tsx'],
     environment: 'node',
+    // Loaded machines are slow; what hangs still ends.
+    testTimeout: 60_000,
     setupFiles: ['fake-indexeddb/auto'],
   },
 });

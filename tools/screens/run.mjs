@@ -8,7 +8,23 @@ import { startCluster } from '../postgres/cluster.mjs';
 import { startProduct } from '../product/product.mjs';
 
 const sizes = { phone: { width: 390, height: 844 }, desk: { width: 1440, height: 900 } };
-const steps = ['arrive', 'walk-through', 'water-off', 'backflow-before-air', 'connect', 'regulator', 'people-clear', 'air', 'close-down', 'backflow-winter', 'drains', 'leave', 'defects', 'log', 'site'];
+const steps = [
+  'arrive',
+  'walk-through',
+  'water-off',
+  'backflow-before-air',
+  'connect',
+  'regulator',
+  'people-clear',
+  'air',
+  'close-down',
+  'backflow-winter',
+  'drains',
+  'leave',
+  'defects',
+  'log',
+  'site',
+];
 
 /** Pictures of every screen with the demo company, at phone and desk size, in both languages, into docs/screens. */
 run(async () => {
@@ -23,7 +39,8 @@ run(async () => {
   try {
     for (const language of ['en', 'es']) {
       for (const [size, viewport] of Object.entries(sizes)) {
-        const shoot = (page, name) => page.screenshot({ path: join(folder, `${name}.${size}.${language}.png`) });
+        const shoot = (page, name) =>
+          page.screenshot({ path: join(folder, `${name}.${size}.${language}.png`) });
         await phoneScreens(browser, product, { language, viewport, shoot });
         await deskScreens(browser, product, { language, viewport, shoot });
       }
@@ -39,7 +56,11 @@ run(async () => {
 });
 
 async function open(browser, product, { language, viewport }, who, preferences = {}) {
-  const context = await browser.newContext({ viewport, locale: language === 'es' ? 'es-US' : 'en-US', timezoneId: 'America/Denver' });
+  const context = await browser.newContext({
+    viewport,
+    locale: language === 'es' ? 'es-US' : 'en-US',
+    timezoneId: 'America/Denver',
+  });
   await context.addInitScript(
     ([kept, chosen]) => {
       localStorage.setItem('rimeward.preferences', kept);
@@ -73,7 +94,10 @@ async function phoneScreens(browser, product, { language, viewport, shoot }) {
     await page.waitForTimeout(400);
     await shoot(page, step === '' ? 'visit' : `visit-${step.slice(1)}`);
   }
-  for (const [path, name] of [['/on-this-phone', 'on-this-phone'], ['/settings', 'settings']]) {
+  for (const [path, name] of [
+    ['/on-this-phone', 'on-this-phone'],
+    ['/settings', 'settings'],
+  ]) {
     await page.goto(product.origin + path);
     await page.locator('main').waitFor();
     await page.waitForTimeout(400);
@@ -98,7 +122,13 @@ async function deskScreens(browser, product, { language, viewport, shoot }) {
 /** The air screen and Today in the other two display modes. */
 async function modeScreens(browser, product, folder) {
   for (const mode of ['night', 'sun']) {
-    const { page, signIn } = await open(browser, product, { language: 'en', viewport: sizes.phone }, 'Marlo', { mode });
+    const { page, signIn } = await open(
+      browser,
+      product,
+      { language: 'en', viewport: sizes.phone },
+      'Marlo',
+      { mode },
+    );
     await signIn();
     await page.locator('ol a').first().waitFor();
     const visit = await page.locator('ol a').first().getAttribute('href');
