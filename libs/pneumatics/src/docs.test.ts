@@ -64,14 +64,13 @@ describe('docs/physics.md', () => {
     }
   });
   it('lists every source with author, place and how far it can be leaned on, and no other', () => {
-    const rows = [...page.matchAll(/^\| `([\w.-]+)` \| (.+) \|$/gm)].map(([, id = '', rest = '']) => [
-      id,
-      rest,
-    ]);
-    expect(rows).toEqual(
+    const listed = [...page.matchAll(/^- `([\w.-]+)`: (.+) \*\*([\w-]+)\*\*$/gm)].map(
+      ([, ...parts]) => parts,
+    );
+    expect(listed).toEqual(
       (Object.keys(sources) as SourceId[]).map((id) => {
         const { title, author, year, place, status } = sources[id];
-        return [id, [title, author, year ?? '', place, status].join(' | ').replaceAll(' |  |', ' | |')];
+        return [id, `${[title, author, year, place].filter((part) => part !== null).join('; ')}.`, status];
       }),
     );
   });
